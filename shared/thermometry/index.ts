@@ -1,0 +1,4 @@
+export * from './errors'
+export * from './its90'
+export * from './thermoelements'
+export * from './run'
