@@ -1,1 +1,6 @@
 export * from './types'
+export { RunInputError } from './errors'
+export { solveRun } from './solveRun'
+export { solveRunOverStates } from './solveRunOverStates'
+export { emfPath } from './emfPath'
+export type { EmfPath, EmfPoint, PathStretch } from './emfPath'

@@ -32,7 +32,10 @@ export interface RunJoint {
   tipSideZone: string
   /** Where the contacts to the display-side section sit; the same zone unless the joint has length. */
   displaySideZone: string
-  /** True when the positive conductor of one side meets the negative conductor of the other. */
+  /**
+   * True when the positive conductor of the tip side meets the negative contact. The crossing lies on the tip
+   * side: contact metals and offsets are named by the leg of the display side.
+   */
   crossed: boolean
   /** Metal of a contact that has length (pin and socket, stud); null when the conductors meet directly. */
   positiveMetal: Thermoelement | null
@@ -45,6 +48,7 @@ export interface RunJoint {
 /** The display's terminals: the end of the run, in a zone of their own. */
 export interface RunTerminals {
   zone: string
+  /** True when the last section's positive conductor sits under the negative terminal. */
   crossed: boolean
   positiveOffsetKelvin: number
   negativeOffsetKelvin: number
