@@ -10,5 +10,7 @@ export default defineNuxtConfig({
   typescript: { strict: true, tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } } },
   runtimeConfig: {
     databaseUrl: '',
+    // NUXT_SESSION_COOKIE_SECURE=false where the site is served without https, as on loopback.
+    session: { password: '', cookie: { secure: true } },
   },
 })

@@ -1,0 +1,31 @@
+import { existsSync } from 'node:fs'
+import path from 'node:path'
+import { rootFolder } from '../paths.mjs'
+import { step } from '../progress.mjs'
+import { loadDemo } from './seed.mjs'
+
+/** @typedef {import('./seed.mjs').DemoAccount} DemoAccount */
+
+/**
+ * Loads the demo when the database is empty, unless the surroundings say COWLBOOK_DEMO=no.
+ * @param {string} databaseUrl
+ * @returns {Promise<DemoAccount[]>} the demo accounts that can sign in
+ */
+export async function demoStep(databaseUrl) {
+  if (process.env.COWLBOOK_DEMO === 'no') return []
+  if (!existsSync(path.join(rootFolder, 'server/demo/seed.ts'))) return []
+  return step('Demo', async (note) => {
+    const { seeded, accounts } = await loadDemo(databaseUrl)
+    note(seeded ? 'loaded' : 'not loaded, the database holds data')
+    return accounts
+  })
+}
+
+/** @param {DemoAccount[]} accounts */
+export function accountLines(accounts) {
+  const roleWidth = Math.max(...accounts.map(({ role }) => role.length))
+  const emailWidth = Math.max(...accounts.map(({ email }) => email.length))
+  return accounts.map(
+    ({ role, email, password }) => `    ${role.padEnd(roleWidth)}  ${email.padEnd(emailWidth)}  ${password}`,
+  )
+}

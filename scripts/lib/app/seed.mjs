@@ -1,0 +1,18 @@
+import path from 'node:path'
+import { createJiti } from 'jiti'
+import { rootFolder } from '../paths.mjs'
+
+/** @typedef {{ email: string, password: string, role: string }} DemoAccount */
+
+/**
+ * Loads the demo into a database that is empty; one that holds anything is left as it is.
+ * @param {string} databaseUrl
+ * @returns {Promise<{ seeded: boolean, accounts: DemoAccount[] }>}
+ */
+export async function loadDemo(databaseUrl) {
+  const jiti = createJiti(import.meta.url, {
+    alias: { '#shared': path.join(rootFolder, 'shared'), '~~': rootFolder },
+  })
+  const { seedDemo } = await jiti.import(path.join(rootFolder, 'server/demo/seed.ts'))
+  return seedDemo(databaseUrl)
+}

@@ -1,0 +1,38 @@
+import { fileURLToPath } from 'node:url'
+import { defineVitestProject } from '@nuxt/test-utils/config'
+import { defineConfig } from 'vitest/config'
+
+const folder = (name: string) => fileURLToPath(new URL(name, import.meta.url))
+
+/** The written-out aliases of the application, for tests that run without Nuxt. */
+const alias = { '#shared': folder('shared'), '~~': folder('.'), '~': folder('app') }
+
+const nodeProject = (name: string, more: object = {}) => ({
+  resolve: { alias },
+  test: { name, environment: 'node', include: [`tests/${name}/**/*.test.ts`], ...more },
+})
+
+export default defineConfig(async () => ({
+  test: {
+    projects: [
+      nodeProject('unit'),
+      nodeProject('reference'),
+      nodeProject('architecture'),
+      nodeProject('integration', {
+        globalSetup: ['tests/integration/global-setup.ts'],
+        // One database, so one file after the other.
+        fileParallelism: false,
+        testTimeout: 20_000,
+      }),
+      nodeProject('bench', { include: [], benchmark: { include: ['tests/bench/**/*.bench.ts'] } }),
+      await defineVitestProject({
+        test: {
+          name: 'nuxt',
+          environment: 'nuxt',
+          include: ['tests/nuxt/**/*.test.ts'],
+          environmentOptions: { nuxt: { domEnvironment: 'happy-dom' } },
+        },
+      }),
+    ],
+  },
+}))
