@@ -1,3 +1,7 @@
+import { parentOf } from './process-table.mjs'
+
+const WATCH_MILLISECONDS = 500
+
 /**
  * What this process has started, so that leaving (in whatever way) stops exactly that, last started first stopped.
  */
@@ -58,6 +62,23 @@ export function leaveOnSignals(exitCodeFor) {
       if (!leaving) void leave(exitCodeFor(signal))
     })
   }
+  if (process.env.npm_lifecycle_event) leaveWithNpm(() => void leave(exitCodeFor('SIGTERM')))
+}
+
+/**
+ * npm runs us through a shell. Ending npm ends at most that shell and passes nothing on to us; we would stay behind,
+ * holding the port. So both are watched.
+ * @param {() => void} goodbye
+ */
+function leaveWithNpm(goodbye) {
+  const lineage = () => `${process.ppid} ${parentOf(process.ppid)}`
+  const original = lineage()
+  const watch = setInterval(() => {
+    if (leaving || lineage() === original) return
+    clearInterval(watch)
+    goodbye()
+  }, WATCH_MILLISECONDS)
+  watch.unref()
 }
 
 /** Never resolves: for a step overtaken by the teardown, which will end the process. @returns {Promise<never>} */

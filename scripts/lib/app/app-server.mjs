@@ -30,6 +30,7 @@ const EXIT_WITH_PARENT = pathToFileURL(path.join(rootFolder, 'scripts/lib/app/ex
  * @returns {NodeJS.ProcessEnv}
  */
 export function appEnvironment({ databaseUrl, sessionPassword, host, port }, surroundings) {
+  /** @type {NodeJS.ProcessEnv} */
   const environment = {
     // A Secure cookie is dropped by most clients over plain http, which is what loopback serves.
     NUXT_SESSION_COOKIE_SECURE: 'false',

@@ -3,16 +3,18 @@ import { createJiti } from 'jiti'
 import { rootFolder } from '../paths.mjs'
 
 /** @typedef {{ email: string, password: string, role: string }} DemoAccount */
+/** @typedef {{ seeded: boolean, accounts: DemoAccount[] }} Seeding */
+/** @typedef {{ seedDemo: (databaseUrl: string) => Promise<Seeding> }} SeedModule */
 
 /**
  * Loads the demo into a database that is empty; one that holds anything is left as it is.
  * @param {string} databaseUrl
- * @returns {Promise<{ seeded: boolean, accounts: DemoAccount[] }>}
+ * @returns {Promise<Seeding>}
  */
 export async function loadDemo(databaseUrl) {
   const jiti = createJiti(import.meta.url, {
     alias: { '#shared': path.join(rootFolder, 'shared'), '~~': rootFolder },
   })
-  const { seedDemo } = await jiti.import(path.join(rootFolder, 'server/demo/seed.ts'))
-  return seedDemo(databaseUrl)
+  const module = await jiti.import(path.join(rootFolder, 'server/demo/seed.ts'))
+  return /** @type {SeedModule} */ (module).seedDemo(databaseUrl)
 }

@@ -1,6 +1,6 @@
 import { readFileSync, readdirSync } from 'node:fs'
 import { Failure } from '../failure.mjs'
-import { birthOf } from '../setup/instance-lock.mjs'
+import { birthOf } from '../process-table.mjs'
 
 const PATIENCE_MILLISECONDS = 60_000
 const PAUSE_MILLISECONDS = 100

@@ -1,26 +1,11 @@
-import { readFileSync, rmSync } from 'node:fs'
+import { rmSync } from 'node:fs'
 import { link, mkdir, readFile, rm, writeFile } from 'node:fs/promises'
 import path from 'node:path'
 import { Failure } from '../failure.mjs'
+import { birthOf } from '../process-table.mjs'
 import { onTeardown } from '../teardown.mjs'
 
 /** @typedef {{ pid: number, birth: string, command: string }} Holder */
-
-/**
- * When a process was born, in kernel ticks. Process numbers are used again; a number together with its birth is not.
- * @param {number} pid
- * @returns {string | undefined} nothing when there is no such process
- */
-export function birthOf(pid) {
-  try {
-    // The name in brackets may hold spaces; the fields counted here come after it.
-    return readFileSync(`/proc/${pid}/stat`, 'utf8')
-      .replace(/^.*\) /s, '')
-      .split(' ')[19]
-  } catch {
-    return undefined
-  }
-}
 
 /**
  * Who works on a data folder now.
