@@ -42,6 +42,10 @@ export const engineLayoutSchema = z
       .refine((list) => new Set(list).size === list.length, 'Name each quantity once.'),
   })
   .strict()
+  .refine(({ cooling, quantities }) => cooling !== 'air' || !quantities.includes('coolant-temperature'), {
+    message: 'An air-cooled engine has no coolant to measure.',
+    path: ['quantities'],
+  })
 export type EngineLayout = z.infer<typeof engineLayoutSchema>
 
 export const createAircraftSchema = z
