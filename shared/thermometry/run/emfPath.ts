@@ -44,7 +44,7 @@ function sample({ conductor, fromCelsius, toCelsius }: Walk, startMillivolts: nu
   const zero = thermoelementMillivolts(conductor, fromCelsius)
   return Array.from({ length: STEPS + 1 }, (_, step) => {
     const celsius = step === STEPS ? toCelsius : fromCelsius + ((toCelsius - fromCelsius) * step) / STEPS
-    return { celsius, millivolts: startMillivolts + thermoelementMillivolts(conductor, celsius) - zero }
+    return { celsius, millivolts: startMillivolts + (thermoelementMillivolts(conductor, celsius) - zero) }
   })
 }
 

@@ -32,7 +32,7 @@ export function compensationMillivolts(display: DisplayInput, celsius: number): 
 
 function convert(type: LetterType, millivolts: number): Indication {
   const range = inverseRange(type)
-  if (millivolts < range.lowMillivolts) return { kind: 'off-scale-low', limitCelsius: range.lowCelsius }
+  if (millivolts <= range.lowMillivolts) return { kind: 'off-scale-low', limitCelsius: range.lowCelsius }
   if (millivolts > range.highMillivolts) return { kind: 'off-scale-high', limitCelsius: range.highCelsius }
   return { kind: 'value', celsius: celsiusFromMillivolts(type, millivolts) }
 }

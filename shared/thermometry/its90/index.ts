@@ -1,0 +1,7 @@
+export { LETTER_TYPES } from './letterType'
+export type { LetterType } from './letterType'
+export { letterTypeRange } from './letterTypeRange'
+export { emfMillivolts } from './emfMillivolts'
+export { sensitivityMillivoltsPerKelvin } from './sensitivityMillivoltsPerKelvin'
+export { celsiusFromMillivolts, inverseRange } from './celsiusFromMillivolts'
+export type { InverseRange } from './celsiusFromMillivolts'
