@@ -82,7 +82,8 @@ function swappedAtBothEnds(lengths: Lengths): DemoRun {
   const run = rightRun(lengths)
   return {
     ...run,
-    joints: [{ ...plug, crossed: true }, feedThrough],
+    // The pins mate with the probe's, so they are of the metals of the probe's conductors that meet them.
+    joints: [{ ...plug, crossed: true, positiveMetal: 'KN', negativeMetal: 'KP' }, feedThrough],
     terminals: { ...terminals, crossed: true },
   }
 }
