@@ -4,4 +4,5 @@ export default defineConfig({
   dialect: 'mysql',
   schema: './server/db/schema',
   out: './drizzle',
+  casing: 'snake_case',
 })
