@@ -1,0 +1,6 @@
+export * from './figure'
+export * from './number'
+export * from './temperature'
+export * from './emf'
+export * from './length'
+export * from './gauge'
