@@ -1,6 +1,6 @@
 import path from 'node:path'
 import { asFailure, failureText } from './lib/failure.mjs'
-import { dataFolder, rootFolder } from './lib/paths.mjs'
+import { dataFolder, packageProgram, rootFolder } from './lib/paths.mjs'
 import { requireFreePort, servingAddress } from './lib/ports.mjs'
 import { isLeaving, leave, leaveOnSignals, onTeardown, waitForTheEnd } from './lib/teardown.mjs'
 import { startApart, stopGroup } from './lib/child-processes.mjs'
@@ -30,8 +30,8 @@ async function develop() {
   const accounts = await demoStep(database.applicationUrl)
   if (accounts.length > 0) console.log(['', ...accountLines(accounts), ''].join('\n'))
   const server = startApart(
-    'npx',
-    ['--no-install', 'nuxt', 'dev', '--host', address.host, '--port', String(address.port)],
+    packageProgram('nuxt'),
+    ['dev', '--host', address.host, '--port', String(address.port)],
     {
       cwd: rootFolder,
       stdio: ['ignore', 'inherit', 'inherit'],

@@ -39,6 +39,7 @@ async function test() {
   const environment = await setUp(stages)
   const results = []
   for (const stage of stages) {
+    if (isLeaving()) await waitForTheEnd()
     const result = await runStage(stage, { environment, passedOn })
     results.push(result)
     // Without a build there is nothing that the later stages could run against.

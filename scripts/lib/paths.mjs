@@ -7,6 +7,11 @@ export const rootFolder = path.resolve(path.dirname(fileURLToPath(import.meta.ur
 /** Everything a running installation keeps: databases, secrets, logs. Ignored by git. */
 export const dataFolder = path.join(rootFolder, '.data')
 
+/** A program that came with an npm package. @param {string} name */
+export function packageProgram(name) {
+  return path.join(rootFolder, 'node_modules', '.bin', name)
+}
+
 /** @param {string} file an absolute path inside the checkout */
 export function shown(file) {
   const relative = path.relative(rootFolder, file)

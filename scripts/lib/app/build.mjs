@@ -2,6 +2,7 @@ import { existsSync } from 'node:fs'
 import { readFile, writeFile } from 'node:fs/promises'
 import path from 'node:path'
 import { Failure } from '../failure.mjs'
+import { packageProgram } from '../paths.mjs'
 import { lastLines, runToEnd } from '../child-processes.mjs'
 import { requireFreeSpace } from '../setup/disk.mjs'
 import { fingerprint } from './fingerprint.mjs'
@@ -49,7 +50,7 @@ export function prepareNuxt(root) {
 
 /** @param {string} root @param {'build' | 'prepare'} command */
 async function nuxt(root, command) {
-  const { code, output } = await runToEnd('npx', ['--no-install', 'nuxt', command], {
+  const { code, output } = await runToEnd(packageProgram('nuxt'), [command], {
     cwd: root,
     env: { ...process.env, NODE_ENV: 'production', NUXT_TELEMETRY_DISABLED: '1' },
   })

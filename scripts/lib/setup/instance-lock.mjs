@@ -32,8 +32,8 @@ export async function takeLock(file, command) {
   await mkdir(path.dirname(file), { recursive: true })
   const mine = { pid: process.pid, birth: birthOf(process.pid) ?? '', command }
   const draft = `${file}.${process.pid}`
-  await writeFile(draft, JSON.stringify(mine))
   try {
+    await writeFile(draft, JSON.stringify(mine))
     const holder = await lockHolder(file)
     if (holder) refuse(holder, file)
     await rm(file, { force: true })

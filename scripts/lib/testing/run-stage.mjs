@@ -3,7 +3,7 @@ import path from 'node:path'
 import { runToEnd } from '../child-processes.mjs'
 import { failureText } from '../failure.mjs'
 import { elapsedText } from '../progress.mjs'
-import { rootFolder } from '../paths.mjs'
+import { packageProgram, rootFolder } from '../paths.mjs'
 import { ensureBuild } from '../app/build.mjs'
 import { countPlaywright, countVerdict, countVitest } from './counting.mjs'
 
@@ -59,7 +59,8 @@ function vitestCommand(project, reportFile) {
 
 /** @param {string[]} command @param {NodeJS.ProcessEnv} environment */
 async function run(command, environment) {
-  const outcome = await runToEnd('npx', ['--no-install', ...command], {
+  const [program = '', ...parameters] = command
+  const outcome = await runToEnd(packageProgram(program), parameters, {
     cwd: rootFolder,
     env: environment,
     show: true,
