@@ -46,3 +46,15 @@ export const createdAtColumn = () =>
 
 /** When the row was written last. */
 export const updatedAtColumn = () => createdAtColumn().$onUpdateFn(() => new Date())
+
+/**
+ * A JSON object or array. MariaDB keeps JSON as text, and whether the driver hands it over parsed depends on both
+ * their versions; here it comes back parsed from either.
+ */
+export function jsonColumn<Data extends object>() {
+  return customType<{ data: Data; driverData: string }>({
+    dataType: () => 'json',
+    fromDriver: (value): Data => (typeof value === 'string' ? (JSON.parse(value) as Data) : value),
+    toDriver: (value) => JSON.stringify(value),
+  })()
+}

@@ -32,3 +32,20 @@ export function isDuplicate(error: unknown, key?: string): boolean {
 function causes(error: unknown): Error[] {
   return error instanceof Error ? [error, ...causes(error.cause)] : []
 }
+
+const CONNECTION_FAILURES = new Set([
+  'ECONNREFUSED',
+  'ECONNRESET',
+  'ENOENT',
+  'ENOTFOUND',
+  'EPIPE',
+  'ETIMEDOUT',
+  'PROTOCOL_CONNECTION_LOST',
+])
+
+/** True when the database could not be reached at all, or was lost on the way. */
+export function isConnectionFailure(error: unknown): boolean {
+  return causes(error).some(
+    (cause) => 'code' in cause && typeof cause.code === 'string' && CONNECTION_FAILURES.has(cause.code),
+  )
+}

@@ -1,8 +1,15 @@
-import { json, mysqlEnum, mysqlTable, primaryKey, varchar } from 'drizzle-orm/mysql-core'
+import { mysqlEnum, mysqlTable, primaryKey, varchar } from 'drizzle-orm/mysql-core'
 import { ROLES } from '../../../shared/domain/permissions/roles'
 import type { EngineLayout } from '../../../shared/schemas/aircraft'
 import { CABLE_STANDARDS } from '../../../shared/schemas/aircraft'
-import { createdAtColumn, idColumn, instantColumn, updatedAtColumn, versionColumn } from '../columns'
+import {
+  createdAtColumn,
+  idColumn,
+  instantColumn,
+  jsonColumn,
+  updatedAtColumn,
+  versionColumn,
+} from '../columns'
 import { users } from './users'
 
 export const aircraft = mysqlTable('aircraft', {
@@ -11,7 +18,7 @@ export const aircraft = mysqlTable('aircraft', {
   registration: varchar({ length: 20 }).notNull(),
   cableStandard: mysqlEnum(CABLE_STANDARDS).notNull(),
   /** The engine as chosen when the aircraft was laid out. */
-  layout: json().$type<EngineLayout>().notNull(),
+  layout: jsonColumn<EngineLayout>().notNull(),
   archivedAt: instantColumn(),
   version: versionColumn(),
   createdBy: idColumn()

@@ -1,5 +1,5 @@
-import { bigint, char, index, int, json, mysqlTable, unique, varchar } from 'drizzle-orm/mysql-core'
-import { idColumn, instantColumn } from '../columns'
+import { bigint, char, index, int, mysqlTable, unique, varchar } from 'drizzle-orm/mysql-core'
+import { idColumn, instantColumn, jsonColumn } from '../columns'
 
 /**
  * Every write, in chains by hash. Rows are only ever added: triggers refuse the rest, and no foreign key leads out,
@@ -18,8 +18,8 @@ export const auditEvents = mysqlTable(
     action: varchar({ length: 60 }).notNull(),
     entity: varchar({ length: 40 }).notNull(),
     entityId: idColumn(),
-    before: json().$type<Record<string, unknown>>(),
-    after: json().$type<Record<string, unknown>>(),
+    before: jsonColumn<Record<string, unknown>>(),
+    after: jsonColumn<Record<string, unknown>>(),
     previousHash: char({ length: 64 }).notNull(),
     hash: char({ length: 64 }).notNull(),
   },

@@ -1,7 +1,7 @@
 import { sql } from 'drizzle-orm'
-import { check, json, mysqlEnum, mysqlTable, primaryKey } from 'drizzle-orm/mysql-core'
+import { check, mysqlEnum, mysqlTable, primaryKey } from 'drizzle-orm/mysql-core'
 import type { FindingCode } from '../../../shared/thermometry/run/types'
-import { celsiusColumn, decimalNumber, idColumn, instantColumn } from '../columns'
+import { celsiusColumn, decimalNumber, idColumn, instantColumn, jsonColumn } from '../columns'
 import { aircraft } from './aircraft'
 import { channels } from './channels'
 import { operatingStates } from './zones'
@@ -31,7 +31,7 @@ export const expectedReadings = mysqlTable(
     /** The end of the scale that was passed; null on the scale. */
     limitCelsius: solvedColumn(),
     errorKelvin: solvedColumn(),
-    findingCodes: json().$type<FindingCode[]>().notNull(),
+    findingCodes: jsonColumn<FindingCode[]>().notNull(),
     solvedAt: instantColumn().notNull(),
   },
   (table) => [

@@ -1,0 +1,7 @@
+export { accountChain, aircraftChain, AUDIT_ACTIONS } from './actions'
+export type { AuditAction, AuditChain, AuditEntity, AuditEntry, AuditSnapshot } from './actions'
+export { appendAuditEvent } from './append'
+export { requireCurrentVersion } from './currentVersion'
+export type { VersionedSubject } from './currentVersion'
+export { verifyAuditChain } from './verify'
+export type { ChainVerdict } from './verify'
