@@ -32,16 +32,22 @@ export function zoneModel(view: RunView, key: string, figures: FigureWords): Zon
   }
 }
 
+/** The alloys that belong at a part, in either leg: a swapped pair is of the right alloys all the same. */
+function intendedAlloys(view: RunView, partId: string): Thermoelement[] {
+  const found = view.solution.contributions.find(({ place }) => partIdOf(place) === partId)
+  return found ? [found.intended.positive, found.intended.negative] : []
+}
+
+function isAmong(alloys: readonly Thermoelement[], element: Thermoelement): boolean {
+  return alloys.some((alloy) => sameThermoelement(alloy, element))
+}
+
 function sectionModel(view: RunView, section: RunSection, index: number, figures: FigureWords): SectionModel {
   const partId = partIdOf({ kind: 'section', sectionId: section.id })
   const found = view.solution.contributions.find(({ place }) => partIdOf(place) === partId)
   const metres = view.lengthsMetres?.[section.id] ?? null
   const reversed = found?.reversed ?? false
-  // A reversed section is judged by the alloys it should have brought to the other leg.
-  const intended = found
-    ? [found.intended.positive, found.intended.negative]
-    : [section.positive, section.negative]
-  const wrong = (element: Thermoelement) => !intended.some((right) => sameThermoelement(right, element))
+  const right = intendedAlloys(view, partId)
   return {
     partId,
     title: `${index + 1} ${section.label}`,
@@ -51,8 +57,8 @@ function sectionModel(view: RunView, section: RunSection, index: number, figures
         ? 'no figure'
         : figures.signedMillivolts(found.millivolts),
     conductors: {
-      positive: conductor(section.positive, wrong(section.positive)),
-      negative: conductor(section.negative, wrong(section.negative)),
+      positive: conductor(section.positive, !isAmong(right, section.positive)),
+      negative: conductor(section.negative, !isAmong(right, section.negative)),
     },
     reversed,
   }
@@ -71,9 +77,13 @@ function jointModels(view: RunView, figures: FigureWords): StationModel[] {
   const swapped = swappedPartIds(view)
   return joints.map((joint, index): StationModel => {
     const partId = partIdOf({ kind: 'joint', jointId: joint.id })
-    const beyond = sections[index + 1]
-    const metal = (leg: 'positive' | 'negative') =>
-      conductor(joint[`${leg}Metal`] ?? beyond?.[leg] ?? 'Cu', straysAt(view, partId, figures).length > 0)
+    const strays = straysAt(view, partId, figures)
+    const right = intendedAlloys(view, partId)
+    const metal = (leg: 'positive' | 'negative') => {
+      const element = joint[`${leg}Metal`] ?? sections[index + 1]?.[leg] ?? 'Cu'
+      // Between equal temperatures a foreign metal does no harm, and no colour is spent on it.
+      return conductor(element, strays.length > 0 && !isAmong(right, element))
+    }
     const hasLength = joint.positiveMetal !== null || joint.negativeMetal !== null
     return {
       partId,
@@ -84,7 +94,7 @@ function jointModels(view: RunView, figures: FigureWords): StationModel[] {
       metals: hasLength ? { positive: metal('positive'), negative: metal('negative') } : null,
       tipSideZone: zoneModel(view, joint.tipSideZone, figures),
       displaySideZone: zoneModel(view, joint.displaySideZone, figures),
-      strays: straysAt(view, partId, figures),
+      strays,
     }
   })
 }
