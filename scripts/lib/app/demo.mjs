@@ -15,8 +15,8 @@ export async function demoStep(databaseUrl) {
   if (process.env.COWLBOOK_DEMO === 'no') return []
   if (!existsSync(path.join(rootFolder, 'server/demo/seed.ts'))) return []
   return step('Demo', async (note) => {
-    const { seeded, accounts } = await loadDemo(databaseUrl)
-    note(seeded ? 'loaded' : 'not loaded, the database holds data')
+    const { seeded, reason, accounts } = await loadDemo(databaseUrl)
+    note(seeded ? 'loaded' : `not loaded, ${reason}`)
     return accounts
   })
 }

@@ -10,16 +10,25 @@ export interface ChannelRowParts {
   readings: ExpectedReading[]
 }
 
+type FoundCodes = Pick<ExpectedReading, 'findingCodes'>
+
 /** Every code found in any of the states, once. */
-export function findingCodesOf(readings: readonly ExpectedReading[]): FindingCode[] {
+function findingCodesOf(readings: readonly FoundCodes[]): FindingCode[] {
   return [...new Set(readings.flatMap((reading) => reading.findingCodes))]
 }
 
+/** What of a channel and its records decides where it stands. */
+export interface StandingParts {
+  channel: Pick<Channel, 'sensor' | 'displayId'>
+  hasProbe: boolean
+  hasRun: boolean
+  readings: readonly FoundCodes[]
+}
+
 /** Where a channel stands, from its records and its stored readings. */
-export function standingOf(parts: Omit<ChannelRowParts, 'displayName'>): ChannelStanding {
-  const { sensor, displayId } = parts.channel
-  const findingCodes = findingCodesOf(parts.readings)
-  return channelStanding({ sensor, displayId, hasProbe: parts.hasProbe, hasRun: parts.hasRun, findingCodes })
+export function standingOf({ channel, hasProbe, hasRun, readings }: StandingParts): ChannelStanding {
+  const { sensor, displayId } = channel
+  return channelStanding({ sensor, displayId, hasProbe, hasRun, findingCodes: findingCodesOf(readings) })
 }
 
 /** Largest |error| over the states, kelvin; null when none of them has a number. */
