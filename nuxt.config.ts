@@ -10,6 +10,8 @@ export default defineNuxtConfig({
   nitro: { imports: { dirs: [] } },
   // The application asks for its account itself; the session stays on the server.
   auth: { loadStrategy: 'none' },
+  // Inline styles would need a hole in the content security policy.
+  features: { inlineStyles: false },
   css: ['~/assets/css/main.css'],
   typescript: { strict: true, tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } } },
   runtimeConfig: {
