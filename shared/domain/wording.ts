@@ -1,6 +1,6 @@
 import type { Quantity } from '../schemas/aircraft'
 import type { Sensor } from '../schemas/channel'
-import type { CompensationKind, JointKind } from '../thermometry/run'
+import type { CompensationKind, FindingCode, JointKind } from '../thermometry/run'
 import type { ChannelStanding } from '../types/workbook'
 import type { ZoneKind } from '../schemas/zone'
 
@@ -83,4 +83,22 @@ export const NEXT_STEP_WORDS: Record<ChannelStanding, string> = {
   faults: 'Open it: the findings name the place and what to do.',
   'as-intended': 'Nothing is wrong as logged. Prove it by checks on the aircraft.',
   'record-only': 'Kept as a record; no expected reading is worked out for this sensor.',
+}
+
+/** Findings in a few words, for lists and tables. */
+export const FINDING_WORDS: Record<FindingCode, string> = {
+  'stray-junction': 'stray junction',
+  'legs-swapped': 'legs swapped',
+  'wrong-conductor': 'wrong conductor',
+  'harmless-metal': 'other metal, harmless',
+  'unequal-contacts': 'terminals off temperature',
+  'display-type-mismatch': 'input set to another type',
+  'compensation-missing': 'no compensation',
+  'compensation-error': 'compensation off',
+  'compensation-adds-degrees': 'adds degrees, not emf',
+  'display-error': 'display error',
+  'reference-block-missing': 'no reference block',
+  'outside-conductor-range': 'beyond a conductor’s data',
+  'tip-outside-type-range': 'tip beyond the type’s range',
+  'off-scale': 'off scale',
 }
