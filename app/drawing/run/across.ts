@@ -81,7 +81,7 @@ function sectionLabels(model: RunModel, places: TrackPlaces): Label[] {
     const figures = [...(section.length === null ? [] : [section.length]), section.adds]
     return [
       ...label(lines, { x, y: CAPTION_Y }, { anchor: 'middle', strong: true }),
-      ...label(figures, { x, y }, { anchor: 'middle', tone: 'soft' }),
+      ...label(figures, { x, y }, { anchor: 'middle' }),
     ]
   })
 }
@@ -100,8 +100,8 @@ function drawDisplay(model: RunModel, terminals: number): Partial<Primitives> {
     labels: [
       ...label(names, { x, y: POSITIVE_Y - 26 }, { strong: true }),
       ...label([reading], { x, y: readingY }, { size: 17, strong: true }),
-      ...label([type], { x, y: readingY + 22 }, { tone: mismatch ? 'trouble' : 'soft', strong: mismatch }),
-      ...label(wrapText(compensation, 12, room, 3), { x, y: readingY + 37 }, { tone: 'soft' }),
+      ...label([type], { x, y: readingY + 22 }, { tone: mismatch ? 'trouble' : 'ink', strong: mismatch }),
+      ...label(wrapText(compensation, 12, room, 3), { x, y: readingY + 37 }),
       ...label(['+'], { x: terminals + 18, y: POSITIVE_Y + 5 }, { size: 15, strong: true, anchor: 'middle' }),
       ...label(['−'], { x: terminals + 18, y: NEGATIVE_Y + 5 }, { size: 15, strong: true, anchor: 'middle' }),
     ],

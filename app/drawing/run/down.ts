@@ -29,7 +29,7 @@ function drawDisplay(display: DisplayModel, top: number): { piece: Partial<Primi
   const height = readingY - top + 22 + details.length * 15 + 14
   const sign = (text: string, x: number) =>
     label([text], { x, y: top + 30 }, { size: 15, strong: true, anchor: 'middle' })
-  const tone = display.mismatch ? 'trouble' : 'soft'
+  const tone = display.mismatch ? 'trouble' : 'ink'
   return {
     bottom: top + height,
     piece: {
@@ -40,7 +40,7 @@ function drawDisplay(display: DisplayModel, top: number): { piece: Partial<Primi
         ...label(names, { x: TEXT_X, y: top + 20 }, { strong: true }),
         ...label([display.reading], { x: TEXT_X, y: readingY }, { size: 17, strong: true }),
         ...label([type], { x: TEXT_X, y: readingY + 21 }, { tone, strong: display.mismatch }),
-        ...label(details, { x: TEXT_X, y: readingY + 36 }, { tone: 'soft' }),
+        ...label(details, { x: TEXT_X, y: readingY + 36 }),
       ],
     },
   }

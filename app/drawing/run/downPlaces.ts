@@ -64,7 +64,7 @@ function placeSection(layout: DownLayout, section: SectionModel, next: StationMo
   layout.y += 10
   write(layout, wrapText(section.title, 12, TEXT_ROOM, 2), { strong: true })
   const figures = [...(section.length === null ? [] : [section.length]), section.adds].join(', ')
-  write(layout, [figures], { tone: 'soft' })
+  write(layout, [figures], {})
   layout.y = Math.max(layout.y + 10, from + 64)
   const pillAt = (from + layout.y) / 2
   enterZone(layout, next.tipSideZone)

@@ -14,7 +14,7 @@ export interface Box extends Point {
   height: number
 }
 
-export type Tone = 'ink' | 'soft' | 'trouble'
+export type Tone = 'ink' | 'trouble'
 
 /** Lines of text; `x`, `y` stand at the baseline of the first. */
 export interface Label extends Point {

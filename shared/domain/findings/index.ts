@@ -1,0 +1,8 @@
+export type { FindingSeverity, FindingWords, ShownUnits } from './types'
+export { figureWords } from './figures'
+export type { FigureWords } from './figures'
+export { compensationWords, conductorWords, jointKindWords, legWords, runNames } from './names'
+export type { RunNames } from './names'
+export { describeFinding } from './describeFinding'
+export { CAUSE_ORDER_WORDS, describeCause } from './describeCause'
+export { NO_FINDINGS } from './cautions'
