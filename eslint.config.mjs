@@ -24,7 +24,7 @@ export default defineConfig(
       'no-undef': 'off',
       '@typescript-eslint/no-explicit-any': 'error',
       '@typescript-eslint/consistent-type-imports': 'error',
-      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
+      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', ignoreRestSiblings: true }],
     },
   },
   {
@@ -41,13 +41,10 @@ export default defineConfig(
     },
   },
   {
-    // The names of pages, layouts and the root are given by Nuxt.
-    files: ['app/pages/**', 'app/layouts/**', 'app/app.vue', 'app/error.vue'],
-    rules: { 'vue/multi-word-component-names': 'off' },
-  },
-  {
     files: ['**/*.vue'],
     rules: {
+      // Nuxt names a component by its folders and its file, a page by its address.
+      'vue/multi-word-component-names': 'off',
       'vue/component-api-style': ['error', ['script-setup']],
       'vue/define-props-declaration': ['error', 'type-based'],
       'vue/define-emits-declaration': ['error', 'type-based'],

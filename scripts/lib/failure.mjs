@@ -1,3 +1,5 @@
+import { rootFolder } from './paths.mjs'
+
 /**
  * A failure that a person can act on. It is printed as what is wrong, where, and what to do, without a stack:
  * a stack says where our script was, not what to mend.
@@ -16,7 +18,7 @@ export class Failure extends Error {
   }
 }
 
-const FULL_DISK_WORDS = /ENOSPC|No space left on device|Disk is full|errno: 28\b/i
+const FULL_DISK_WORDS = /ENOSPC|No space left on device|Disk is full|out of disk space|err(or|no):? 28\b/i
 const FULL_DISK_ADVICE =
   'Free some space on that file system and start again; nothing that was stored before is lost.'
 
@@ -43,7 +45,7 @@ export function asFailure(thrown) {
     thrown instanceof Error ? thrown : new Error(String(thrown))
   )
   if (error.code === 'ENOSPC') {
-    return new Failure('The disk is full.', { where: error.path, todo: FULL_DISK_ADVICE })
+    return new Failure('The disk is full.', { where: error.path ?? rootFolder, todo: FULL_DISK_ADVICE })
   }
   if (error.code === 'EACCES' || error.code === 'EPERM' || error.code === 'EROFS') {
     return new Failure(`Not allowed: ${error.message}.`, {

@@ -7,7 +7,9 @@ import { requireFreeSpace } from '../setup/disk.mjs'
 import { findProgram } from '../setup/debian.mjs'
 import { shown } from '../paths.mjs'
 
-const NEEDED_MEGABYTES = 300
+const NEEDED_TO_MAKE_MEGABYTES = 300
+// The server writes its temporary tablespace anew at every start.
+const NEEDED_TO_RUN_MEGABYTES = 60
 
 /**
  * What to do about a data directory that the server cannot use.
@@ -34,10 +36,11 @@ export async function prepareDataDirectory(directory, user) {
         todo: brokenDirectoryAdvice(directory),
       })
     }
+    await requireFreeSpace(directory, NEEDED_TO_RUN_MEGABYTES, 'the database to run')
     await handOver(directory, user)
     return 'found'
   }
-  await requireFreeSpace(path.dirname(directory), NEEDED_MEGABYTES, 'a new database')
+  await requireFreeSpace(path.dirname(directory), NEEDED_TO_MAKE_MEGABYTES, 'a new database')
   await makeDataDirectory(directory, user)
   return 'made'
 }

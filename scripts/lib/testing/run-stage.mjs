@@ -8,7 +8,7 @@ import { ensureBuild } from '../app/build.mjs'
 import { countPlaywright, countVerdict, countVitest } from './counting.mjs'
 
 const REPORT_FOLDER = path.join(rootFolder, 'test-results')
-const LIMIT_MILLISECONDS = 8 * 60_000
+const LIMIT_MILLISECONDS = 5 * 60_000
 
 /** @typedef {import('./stages.mjs').Stage} Stage */
 /** @typedef {{ environment: NodeJS.ProcessEnv, passedOn: string[] }} Surroundings */

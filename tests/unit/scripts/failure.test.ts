@@ -25,6 +25,12 @@ describe('a failure is printed as', () => {
     [Object.assign(new Error('write'), { code: 'ENOSPC', path: '/data' })],
     [new Failure('npm ci failed.', { where: '/data', detail: 'npm error nospc ENOSPC: no space left' })],
     [new Failure('MariaDB failed.', { where: '/data', detail: '[ERROR] InnoDB: No space left on device' })],
+    [
+      new Failure('MariaDB failed.', {
+        where: '/data',
+        detail: "[ERROR] preallocating './ibtmp1' failed with error 28",
+      }),
+    ],
   ])('a full disk, whoever met it first: %s', (thrown) => {
     const failure = asFailure(thrown)
     expect(failure.message).toBe('The disk is full.')
