@@ -1,4 +1,4 @@
 export { layOutEngine } from './layOutEngine'
 export { EngineLayoutError } from './errors'
 export { SUGGESTED_TEMPERATURES_SOURCE } from './states'
-export type { EngineLayOut, LaidOutChannel, LaidOutState, LaidOutZone } from './types'
+export type { EngineLayOut } from './types'
