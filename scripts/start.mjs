@@ -31,7 +31,10 @@ async function start() {
   await ensureNodeModules(rootFolder)
   // Only now: these need npm packages, which a fresh checkout does not have when this script is loaded.
   const { serve } = await import('./lib/app/serve.mjs')
-  await step('Application', async (note) => note(await ensureBuild(rootFolder)))
+  await step('Application', async (note) => {
+    note('building')
+    note(await ensureBuild(rootFolder))
+  })
   const secrets = await loadSecrets(path.join(dataFolder, 'secrets.json'))
   const { baseUrl, accountText } = await serve(address, secrets)
   console.log(`\nCowlbook is ready after ${elapsedText(Date.now() - begin)}: ${baseUrl}\n`)

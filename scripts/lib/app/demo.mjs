@@ -1,6 +1,3 @@
-import { existsSync } from 'node:fs'
-import path from 'node:path'
-import { rootFolder } from '../paths.mjs'
 import { step } from '../progress.mjs'
 import { loadDemo } from './seed.mjs'
 
@@ -13,7 +10,6 @@ import { loadDemo } from './seed.mjs'
  */
 export async function demoStep(databaseUrl) {
   if (process.env.COWLBOOK_DEMO === 'no') return []
-  if (!existsSync(path.join(rootFolder, 'server/demo/seed.ts'))) return []
   return step('Demo', async (note) => {
     const { seeded, reason, accounts } = await loadDemo(databaseUrl)
     note(seeded ? 'loaded' : `not loaded, ${reason}`)
