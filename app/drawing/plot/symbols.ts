@@ -35,7 +35,7 @@ export function placeSymbols(curves: readonly Curve[]): PlotText[] {
     const middle = points[Math.floor(points.length / 2)]
     if (!middle || lengthOf(points) < LEAST_LENGTH) continue
     const candidate: PlotText = above
-      ? { text, x: middle.x + 8, y: middle.y - 9, anchor: 'start' }
+      ? { text, x: middle.x - 6, y: middle.y - 8, anchor: 'end' }
       : { text, x: middle.x + 8, y: middle.y + 18, anchor: 'start' }
     if (placed.every((other) => !overlap(boxOf(candidate), boxOf(other)))) placed.push(candidate)
   }

@@ -15,12 +15,15 @@ import type { StationPlace, TrackPlaces } from './track'
 import { ACROSS, drawTrack, swapText } from './track'
 import type { RunModel, StationModel } from './types'
 
-const HEIGHT = 364
+const HEIGHT = 362
+/** Below this the sheet is bare, for dimensions and captions. */
+const ZONES_HEIGHT = 276
+const DIMENSION_Y = 288
 /** Baseline of the last line of a joint's name. */
-const NAMES_Y = 112
-const STRAY_POSITIVE_Y = 128
+const NAMES_Y = 109
+const STRAY_POSITIVE_Y = 129
 const STRAY_NEGATIVE_Y = 256
-const CAPTION_Y = 292
+const CAPTION_Y = 307
 
 function drawZones(model: RunModel, places: TrackPlaces, width: number): Partial<Primitives> {
   const stretches = zoneStretches(model, places, width)
@@ -28,9 +31,11 @@ function drawZones(model: RunModel, places: TrackPlaces, width: number): Partial
     bands: stretches.map(({ zone, from, to }) => ({
       key: zone.key,
       heat: zone.heat,
-      box: { x: from, y: 0, width: to - from, height: HEIGHT },
+      box: { x: from, y: 0, width: to - from, height: ZONES_HEIGHT },
     })),
-    dividers: stretches.slice(1).map(({ from }) => ({ from: { x: from, y: 0 }, to: { x: from, y: HEIGHT } })),
+    dividers: stretches
+      .slice(1)
+      .map(({ from }) => ({ from: { x: from, y: 0 }, to: { x: from, y: ZONES_HEIGHT } })),
     labels: stretches.flatMap(({ zone, from, to }) => {
       const lines = wrapText(zone.name, 12, to - from - 16, 2)
       const x = from + 8
@@ -76,7 +81,7 @@ function sectionLabels(model: RunModel, places: TrackPlaces): Label[] {
     if (!place) return []
     const x = index === 0 ? (places.tip + place.to) / 2 : (place.from + place.to) / 2
     const width = index === 0 ? place.to - places.tip : place.to - place.from
-    const lines = wrapText(section.title, 12, width - 6, 3)
+    const lines = wrapText(section.title, 12, width - 6, 2)
     const y = CAPTION_Y + lines.length * 14
     const figures = [...(section.length === null ? [] : [section.length]), section.adds]
     return [
@@ -84,6 +89,13 @@ function sectionLabels(model: RunModel, places: TrackPlaces): Label[] {
       ...label(figures, { x, y }, { anchor: 'middle' }),
     ]
   })
+}
+
+function dimensions({ tip, sections }: TrackPlaces): Primitives['dimensions'] {
+  return sections.map(({ from, to }, index) => ({
+    from: { x: index === 0 ? tip : from, y: DIMENSION_Y },
+    to: { x: to, y: DIMENSION_Y },
+  }))
 }
 
 function drawDisplay(model: RunModel, terminals: number): Partial<Primitives> {
@@ -147,7 +159,7 @@ export function drawAcross(model: RunModel): RunGeometry {
       ],
     },
     drawDisplay(model, terminals),
-    { areas: areas(model, places) },
+    { dimensions: dimensions(places), areas: areas(model, places) },
   ])
   return { ...primitives, orientation: 'across', width, height: HEIGHT }
 }

@@ -5,7 +5,7 @@ import type { RunModel, SectionModel, StationModel, StrayModel } from './types'
 
 /** The full width of a drawing that has room to spare. */
 const SHEET_WIDTH = 880
-export const DISPLAY_WIDTH = 172
+export const DISPLAY_WIDTH = 164
 export const POSITIVE_Y = 166
 export const NEGATIVE_Y = 226
 
@@ -43,7 +43,7 @@ interface Extent {
 function stationExtent(station: StationModel): Extent {
   const { metals, crossed } = station
   const contact = metals
-    ? Math.max(pillWidth(metals.positive.symbol), pillWidth(metals.negative.symbol)) + 28
+    ? Math.max(pillWidth(metals.positive.symbol), pillWidth(metals.negative.symbol)) + 24
     : 0
   const core = contact + (crossed ? CROSSING : 0)
   const lines = [...stationLines(station), swapText(station) ?? '']
@@ -66,10 +66,10 @@ function stationExtent(station: StationModel): Extent {
   }
 }
 
-/** A section's caption may take up to three lines of its title. */
+/** A section's caption has two lines for its title. */
 function sectionLength({ title, conductors }: SectionModel, before: Extent | null, after: Extent): number {
   const symbols = Math.max(pillWidth(conductors.positive.symbol), pillWidth(conductors.negative.symbol))
-  const caption = Math.min(160, Math.max(92, textWidth(title, 12) / 2 + 16))
+  const caption = Math.min(160, Math.max(84, textWidth(title, 12) / 2 + 20))
   const room = before ? before.right - before.core / 2 + after.left - after.core / 2 + GAP : 0
   return Math.max(symbols + 36, caption, room)
 }

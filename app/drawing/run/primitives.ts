@@ -35,6 +35,8 @@ export interface Primitives {
   bands: { key: string; heat: HeatStep; box: Box }[]
   /** Where one zone ends and the next begins. */
   dividers: { from: Point; to: Point }[]
+  /** How far a section reaches, as a dimension under the drawing. */
+  dimensions: { from: Point; to: Point }[]
   wires: (OfPart & { path: string; style: LineStyle; wrong: boolean })[]
   /** Conductors exchanging places, the second one drawn over the first. */
   crossings: (OfPart & {
@@ -65,6 +67,7 @@ export function together(pieces: readonly Partial<Primitives>[]): Primitives {
   return {
     bands: pieces.flatMap((piece) => piece.bands ?? []),
     dividers: pieces.flatMap((piece) => piece.dividers ?? []),
+    dimensions: pieces.flatMap((piece) => piece.dimensions ?? []),
     wires: pieces.flatMap((piece) => piece.wires ?? []),
     crossings: pieces.flatMap((piece) => piece.crossings ?? []),
     bodies: pieces.flatMap((piece) => piece.bodies ?? []),
