@@ -1,5 +1,5 @@
 import type { H3Event } from 'h3'
-import { getCookie } from 'h3'
+import { deleteCookie, getCookie } from 'h3'
 import type { Account } from '#shared/types/account'
 import { database } from '~~/server/db/client'
 import type { AccountSecrets } from '~~/server/repositories/accounts'
@@ -22,12 +22,12 @@ declare module '#auth-utils' {
  */
 export async function readSession(event: H3Event): Promise<Account | null> {
   // Reading a session where there is none would start one, and set a cookie on people who never sign in.
-  if (getCookie(event, SESSION_COOKIE) === undefined) return null
+  if (!getCookie(event, SESSION_COOKIE)) return null
   const { secure } = await getUserSession(event)
   if (!secure) return null
   const found = await findAccount(database(), secure.accountId)
   if (found && found.sessionVersion === secure.sessionVersion) return found.account
-  await clearUserSession(event)
+  await endSession(event)
   return null
 }
 
@@ -43,4 +43,6 @@ export async function startSession(
 
 export async function endSession(event: H3Event): Promise<void> {
   await clearUserSession(event)
+  // The library leaves an empty cookie behind.
+  deleteCookie(event, SESSION_COOKIE, { path: '/' })
 }

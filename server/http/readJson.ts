@@ -13,10 +13,16 @@ export async function readJson(event: H3Event): Promise<unknown> {
   }
   const text = await readLimited(event)
   try {
-    return JSON.parse(text)
+    return JSON.parse(text, wellFormed)
   } catch (cause) {
     throw new AppError('invalid-input', 'The body is not valid JSON.', { status: 400, cause })
   }
+}
+
+/** Half of a surrogate pair is valid JSON but no text, and the database would refuse it late or store another. */
+function wellFormed(_key: string, value: unknown): unknown {
+  if (typeof value === 'string' && !value.isWellFormed()) throw new SyntaxError('A text is not well-formed.')
+  return value
 }
 
 async function readLimited(event: H3Event): Promise<string> {
