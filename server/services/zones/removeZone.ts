@@ -2,6 +2,7 @@ import { conflict } from '~~/server/http/appError'
 import { deleteZone } from '~~/server/repositories/zones'
 import type { ZoneUses } from '~~/server/repositories/zoneUses'
 import { findZoneUses } from '~~/server/repositories/zoneUses'
+import { listTemperatures } from '~~/server/repositories/zoneTemperatures'
 import type { AircraftScope } from '../aircraft/changeAircraft'
 import { changeAircraft } from '../aircraft/changeAircraft'
 import { recordWrite, requireVersion } from '../aircraft/recordWrite'
@@ -16,7 +17,7 @@ function usesInWords({ tips, joints, displays }: ZoneUses): string[] {
   ]
 }
 
-/** Removes a zone that nothing sits in. */
+/** Removes a zone that nothing sits in. History keeps how warm it was in each state. */
 export function removeZone(scope: AircraftScope, zoneId: number, version: number): Promise<void> {
   const { aircraftId } = scope
   return changeAircraft(scope, async (tx) => {
@@ -24,11 +25,12 @@ export function removeZone(scope: AircraftScope, zoneId: number, version: number
     await requireVersion(tx, scope, zoneSubject(zone), zone, version)
     const uses = usesInWords(await findZoneUses(tx, aircraftId, zoneId))
     if (uses.length > 0) throw conflict(`"${zone.name}" is in use: ${nameSome(uses)}.`)
+    const temperatures = await listTemperatures(tx, aircraftId)
     await deleteZone(tx, aircraftId, zoneId)
     await recordWrite(tx, scope, {
       action: 'zone.deleted',
       entityId: zoneId,
-      before: zone,
+      before: { ...zone, temperatures: temperatures.filter((one) => one.zoneId === zoneId) },
       after: null,
     })
   })

@@ -1,4 +1,4 @@
-import { beforeEach, describe, expect, it } from 'vitest'
+import { beforeEach, describe, expect, inject, it } from 'vitest'
 import type { Problem } from '#shared/types/problem'
 import type {
   Aircraft,
@@ -9,11 +9,14 @@ import type {
   Person,
 } from '#shared/types/workbook'
 import { signUp } from '../../factories/client'
-import { aircraftInput } from '../../factories/records'
+import { aircraftInput, probeInput, runInput } from '../../factories/records'
+import { filledTables } from '../../factories/tables'
 import { channelRows, createWorkbook } from '../../factories/workbook'
 import { resetDatabase } from '../support/reset'
 
 beforeEach(() => resetDatabase())
+
+const OF_ACCOUNTS = ['users', 'sign_in_attempts']
 
 describe('a new aircraft', () => {
   it('is laid out with zones, states, temperatures, a display and channels', async () => {
@@ -103,6 +106,18 @@ describe('the life of an aircraft', () => {
     const gone = await client.send('DELETE', `${path}?version=${restored.aircraft.version}`)
     expect(gone.status).toBe(204)
     expect((await client.get(path)).status).toBe(404)
+  })
+
+  it('leaves its history and nothing else when it is deleted', async () => {
+    const { client, aircraft, path, channel, zone } = await createWorkbook()
+    await client.must('PUT', `${path}/channels/${channel('EGT 1').id}/probe`, probeInput())
+    await client.must('PUT', `${path}/channels/${channel('EGT 1').id}/run`, {
+      version: null,
+      run: runInput(zone('Engine bay').id),
+    })
+    await client.must('DELETE', `${path}?version=${aircraft.version}`)
+    const left = await filledTables(inject('databaseUrl'))
+    expect(left.filter((name) => !OF_ACCOUNTS.includes(name))).toEqual(['audit_chains', 'audit_events'])
   })
 
   it('refuses every write while archived, but not reading, restoring or deleting', async () => {

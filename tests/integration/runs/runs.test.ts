@@ -100,6 +100,28 @@ describe('a wiring run', () => {
       })
   })
 
+  it('stores that an answer is withheld where no data reach', async () => {
+    const { client, path, channel, zone, grid } = await createWorkbook()
+    const [state] = grid.states
+    await client.must('PUT', `${path}/channels/${channel('EGT 1').id}/run`, {
+      version: null,
+      run: runInput(zone('Engine bay').id),
+    })
+    await client.must('PUT', `${path}/states/${state?.id}/temperatures/${zone('Exhaust 1').id}`, {
+      version: 1,
+      celsius: 2500,
+    })
+    const { readings } = await client.must<ChannelSheet>('GET', `${path}/channels/${channel('EGT 1').id}`)
+    const withheld = readings.find((reading) => reading.stateId === state?.id)
+    expect(withheld).toMatchObject({
+      tipCelsius: 2500,
+      indication: { kind: 'withheld' },
+      terminalMillivolts: null,
+      errorKelvin: null,
+    })
+    expect(withheld?.findingCodes).toContain('tip-outside-type-range')
+  })
+
   it('cannot pass a zone of another aircraft, and says at which joint', async () => {
     const [mine, theirs] = [await createWorkbook(), await createWorkbook()]
     const { status, body } = await mine.client.send<Problem>(
