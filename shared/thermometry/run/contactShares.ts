@@ -45,6 +45,18 @@ export function contactShares(circuit: Circuit): ContactShare[] | null {
   return LEGS.flatMap((leg) => legShares(circuit, leg)).filter((share) => share.microvolts !== 0)
 }
 
+/**
+ * The element up to which a conductor goes on in its own alloy without a change of temperature. Where it ends the
+ * foreign metal begins: a pin of the cable's alloy, or a length in one zone, is not where the junction sits.
+ */
+function lastOfItsAlloy(elements: readonly CircuitElement[], start: number, leg: Leg): CircuitElement {
+  const first = elements[start] as CircuitElement
+  const next = elements[start + 1]
+  const goesOn =
+    next && isIsothermal(next, leg) && sameThermoelement(next.conductors[leg], first.conductors[leg])
+  return goesOn ? lastOfItsAlloy(elements, start + 1, leg) : first
+}
+
 function legShares(circuit: Circuit, leg: Leg): ContactShare[] {
   const { elements, referenceCelsius } = circuit
   const sign = leg === 'positive' ? 1 : -1
@@ -64,12 +76,13 @@ function legShares(circuit: Circuit, leg: Leg): ContactShare[] {
     },
   ]
   live.forEach((element, position) => {
+    const contact = lastOfItsAlloy(elements, elements.indexOf(element), leg).displayEnd
     const next = live[position + 1]
     const celsius = element.displaySideCelsius[leg]
     const before = deviation(element, leg, celsius, referenceCelsius)
     const after = next ? deviation(next, leg, celsius, referenceCelsius) : 0
     shares.push({
-      ...element.displayEnd,
+      ...contact,
       leg,
       celsius,
       metals: [element.conductors[leg], next?.conductors[leg] ?? 'Cu'],
