@@ -80,8 +80,8 @@ export function wrongConductorWords(
 ): FindingWords {
   return {
     title: `${conductorWords(actual)} instead of ${conductorWords(intended)}: ${names.place(place)}, ${legWords(leg)}`,
-    explanation: `A type ${names.type} channel needs ${conductorWords(intended)} here. Another alloy makes its own emf wherever its two ends differ in temperature, so the reading follows the warmth of the joints as well as the tip.`,
-    whatToDo: `Replace the conductor by ${conductorWords(intended)}, from joint to joint. Loop resistance tells copper from thermocouple alloy before the cable is opened.`,
+    explanation: `Another alloy than type ${names.type} asks for makes its own emf wherever its two ends differ in temperature, so the reading follows the warmth of the joints as well as the tip.`,
+    whatToDo: `Replace the section by type ${names.type} cable, from joint to joint. Loop resistance tells copper from thermocouple alloy before the cable is opened.`,
     cautions: [CAUTIONS.resistance, CAUTIONS.cold],
     severity: 'fault',
   }
