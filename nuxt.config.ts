@@ -12,7 +12,7 @@ export default defineNuxtConfig({
   auth: { loadStrategy: 'none' },
   // Inline styles would need a hole in the content security policy.
   features: { inlineStyles: false },
-  css: ['~/assets/css/main.css'],
+  tailwindcss: { cssPath: '~/assets/css/main.css', viewer: false },
   typescript: { strict: true, tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } } },
   runtimeConfig: {
     databaseUrl: '',
