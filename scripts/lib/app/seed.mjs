@@ -3,7 +3,7 @@ import { createJiti } from 'jiti'
 import { rootFolder } from '../paths.mjs'
 
 /** @typedef {{ email: string, password: string, role: string }} DemoAccount */
-/** @typedef {{ seeded: boolean, accounts: DemoAccount[] }} Seeding */
+/** @typedef {{ seeded: boolean, reason: string | null, accounts: DemoAccount[] }} Seeding */
 /** @typedef {{ seedDemo: (databaseUrl: string) => Promise<Seeding> }} SeedModule */
 
 /**
