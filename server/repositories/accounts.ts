@@ -1,4 +1,4 @@
-import { eq, sql } from 'drizzle-orm'
+import { count, eq, sql } from 'drizzle-orm'
 import type { Preferences } from '#shared/schemas/account'
 import type { Account } from '#shared/types/account'
 import type { Executor } from '~~/server/db/client'
@@ -40,6 +40,11 @@ export async function findAccountByEmail(db: Executor, email: string): Promise<A
 export async function lockAccount(db: Executor, id: number): Promise<AccountSecrets | undefined> {
   const [row] = await db.select().from(users).where(eq(users.id, id)).for('update')
   return row && toSecrets(row)
+}
+
+export async function countAccounts(db: Executor): Promise<number> {
+  const [row] = await db.select({ total: count() }).from(users)
+  return row?.total ?? 0
 }
 
 /** @returns the id of the new account */
