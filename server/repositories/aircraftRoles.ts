@@ -2,7 +2,7 @@ import { and, asc, eq, inArray } from 'drizzle-orm'
 import type { Role } from '#shared/domain/permissions'
 import type { Executor } from '~~/server/db/client'
 import { memberships } from '~~/server/db/schema'
-import { groupBy } from './grouping'
+import { groupBy } from '~~/server/db/groupBy'
 
 /** The roles of one person on several aircraft, in one query. */
 export async function rolesByAircraft(

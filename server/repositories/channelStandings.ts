@@ -3,7 +3,7 @@ import type { FindingCode } from '#shared/thermometry/run'
 import type { Channel } from '#shared/types/workbook'
 import type { Executor } from '~~/server/db/client'
 import { channels, expectedReadings, probes, wiringRuns } from '~~/server/db/schema'
-import { groupBy } from './grouping'
+import { groupBy } from '~~/server/db/groupBy'
 
 /** What decides where a channel stands, without everything else there is to it. */
 export interface StandingRecords {

@@ -5,7 +5,7 @@ import { inTransaction } from '~~/server/db/client'
 import { countAircraft, pageOfAircraft } from '~~/server/repositories/aircraft'
 import { rolesByAircraft } from '~~/server/repositories/aircraftRoles'
 import { listStandingRecords } from '~~/server/repositories/channelStandings'
-import { groupBy } from '~~/server/repositories/grouping'
+import { groupBy } from '~~/server/db/groupBy'
 import { countStandings } from './countStandings'
 
 /** One page of a person's own aircraft, in a number of queries that does not grow with them. */

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { groupBy } from '~~/server/repositories/grouping'
+import { groupBy } from '~~/server/db/groupBy'
 
 describe('groups', () => {
   it('keep the order of their items, and come in the order of their first ones', () => {
