@@ -16,9 +16,12 @@ const isBelow = (target: string, ...folders: string[]) =>
 
 const isDatabasePackage = ({ isOwn, target }: Import) => !isOwn && isBelow(target, ...DATABASE_PACKAGES)
 
+/** They compute nothing: they look up what is known of a conductor. */
+const LOOK_UPS = new Set(['thermoelementInfo', 'legsOf'])
+
 /** Functions are named in lower case; constants and types are not, and any screen may use those. */
 const bringsInPhysics = ({ target, values }: Import) =>
-  isBelow(target, 'shared/thermometry') && values.some((name) => /^[a-z*]/.test(name))
+  isBelow(target, 'shared/thermometry') && values.some((name) => /^[a-z*]/.test(name) && !LOOK_UPS.has(name))
 
 export const RULES: Rule[] = [
   {
