@@ -1,9 +1,21 @@
-import type { OperatingConditions, ThermocoupleRun } from '#shared/thermometry/run'
+import type { OperatingConditions, RunStatesSolution, ThermocoupleRun } from '#shared/thermometry/run'
 import { emfPath, RunInputError, solveRunOverStates } from '#shared/thermometry/run'
 
 interface Circuit {
   run: ThermocoupleRun
   states: readonly OperatingConditions[]
+}
+
+/** An error smaller than any display shows, kelvin. */
+const NEGLIGIBLE_KELVIN = 0.05
+
+/** The state worth looking at first: the worst, or where nothing is wrong the one with the most emf. */
+function telling({ states, worst }: RunStatesSolution): string {
+  if (worst && (worst.errorKelvin === null || Math.abs(worst.errorKelvin) >= NEGLIGIBLE_KELVIN))
+    return worst.id
+  const emf = (index: number) => Math.abs(states[index]?.solution.terminalMillivolts ?? 0)
+  const most = states.reduce((best, _, index) => (emf(index) > emf(best) ? index : best), 0)
+  return states[most]?.id ?? ''
 }
 
 /** A run solved over its operating states by the shared physics, and the one state that is looked at. */
@@ -22,9 +34,8 @@ export function useSolvedRun(source: () => Circuit | null) {
   })
   const solved = computed(() => outcome.value.solved)
 
-  /** The state looked at: the chosen one, else the worst. */
   const stateId = computed({
-    get: () => chosen.value ?? solved.value?.worst?.id ?? '',
+    get: () => chosen.value ?? (solved.value ? telling(solved.value) : ''),
     set: (id: string) => {
       chosen.value = id
     },

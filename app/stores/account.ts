@@ -50,5 +50,5 @@ export const useAccountStore = defineStore('account', () => {
     if (account.value) hold(await api.patch<{ account: Account }>('/api/account/preferences', choice))
   }
 
-  return { account, load, register, signIn, signOut, changePassword, choosePreferences }
+  return { account, loaded, load, register, signIn, signOut, changePassword, choosePreferences }
 })

@@ -13,6 +13,8 @@ const TEXT_X = 142
 const TEXT_ROOM = DOWN_WIDTH - TEXT_X - 8
 const LINE = 15
 const CROSSING = 40
+/** From where a joint begins to its first contact. */
+const CONTACT = 14
 
 /** What has been laid out so far, top to bottom. */
 export interface DownLayout {
@@ -68,13 +70,16 @@ function placeSection(layout: DownLayout, section: SectionModel, next: StationMo
   layout.y = Math.max(layout.y + 10, from + 64)
   const pillAt = (from + layout.y) / 2
   enterZone(layout, next.tipSideZone)
-  layout.sections.push({ from, to: layout.y, pillAt })
+  // The conductors begin at the last contact, wherever the text of that joint ends.
+  const start = layout.stations.at(-1)?.displaySide ?? from
+  const end = next.crossed ? layout.y : layout.y + CONTACT
+  layout.sections.push({ from: start, to: end, pillAt })
   layout.reach.set(section.partId, [from, layout.y])
 }
 
 function placeStation(layout: DownLayout, station: StationModel): void {
   const from = layout.y
-  const tipSide = from + (station.crossed ? CROSSING : 0) + 14
+  const tipSide = from + (station.crossed ? CROSSING : 0) + CONTACT
   layout.y += 4
   write(layout, wrapText(station.label, 12, TEXT_ROOM, 2))
   const swap = swapText(station)
