@@ -1,5 +1,6 @@
 import type { Finding } from '../../thermometry/run'
-import { pairType } from '../../thermometry/thermoelements'
+import type { Thermoelement } from '../../thermometry/thermoelements'
+import { pairType, sameThermoelement } from '../../thermometry/thermoelements'
 import { CAUTIONS } from './cautions'
 import type { FigureWords } from './figures'
 import type { RunNames } from './names'
@@ -73,14 +74,23 @@ export function legsSwappedWords(
   }
 }
 
+function capitalised(words: string): string {
+  return `${words.charAt(0).toUpperCase()}${words.slice(1)}`
+}
+
+function copperHint(actual: Thermoelement): string {
+  if (!sameThermoelement(actual, 'Cu')) return ''
+  return ' Copper in both legs adds nothing: the reading then lacks about the difference between the temperatures of the two ends.'
+}
+
 /** A section laid in another alloy. */
 export function wrongConductorWords(
   { place, leg, actual, intended }: Of<'wrong-conductor'>,
   names: RunNames,
 ): FindingWords {
   return {
-    title: `${conductorWords(actual)} instead of ${conductorWords(intended)}: ${names.place(place)}, ${legWords(leg)}`,
-    explanation: `Another alloy than type ${names.type} asks for makes its own emf wherever its two ends differ in temperature, so the reading follows the warmth of the joints as well as the tip.`,
+    title: `${capitalised(conductorWords(actual))} instead of ${conductorWords(intended)}: ${names.place(place)}, ${legWords(leg)}`,
+    explanation: `Another alloy than type ${names.type} asks for makes its own emf wherever its two ends differ in temperature, so the reading follows the warmth of the joints as well as the tip.${copperHint(actual)}`,
     whatToDo: `Replace the section by type ${names.type} cable, from joint to joint. Loop resistance tells copper from thermocouple alloy before the cable is opened.`,
     cautions: [CAUTIONS.resistance, CAUTIONS.cold],
     severity: 'fault',
