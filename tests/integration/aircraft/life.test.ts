@@ -1,4 +1,4 @@
-import { beforeEach, describe, expect, inject, it } from 'vitest'
+import { beforeAll, describe, expect, inject, it } from 'vitest'
 import type { Problem } from '#shared/types/problem'
 import type {
   Aircraft,
@@ -14,7 +14,7 @@ import { filledTables } from '../../factories/tables'
 import { channelRows, createWorkbook } from '../../factories/workbook'
 import { resetDatabase } from '../support/reset'
 
-beforeEach(() => resetDatabase())
+beforeAll(() => resetDatabase())
 
 const OF_ACCOUNTS = ['users', 'sign_in_attempts']
 
@@ -109,6 +109,7 @@ describe('the life of an aircraft', () => {
   })
 
   it('leaves its history and nothing else when it is deleted', async () => {
+    await resetDatabase()
     const { client, aircraft, path, channel, zone } = await createWorkbook()
     await client.must('PUT', `${path}/channels/${channel('EGT 1').id}/probe`, probeInput())
     await client.must('PUT', `${path}/channels/${channel('EGT 1').id}/run`, {

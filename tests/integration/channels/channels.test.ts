@@ -1,11 +1,11 @@
-import { beforeEach, describe, expect, it } from 'vitest'
+import { beforeAll, describe, expect, it } from 'vitest'
 import type { Problem } from '#shared/types/problem'
 import type { Channel, ChannelSheet, ChannelTable } from '#shared/types/workbook'
 import { probeInput, runInput, thermocoupleInput } from '../../factories/records'
 import { channelRows, createWorkbook } from '../../factories/workbook'
 import { resetDatabase } from '../support/reset'
 
-beforeEach(() => resetDatabase())
+beforeAll(() => resetDatabase())
 
 /** What a form sends back: everything of the channel but what only the server gives. */
 function edit({ id: _id, position: _position, ...fields }: Channel, changes: Partial<Channel> = {}) {

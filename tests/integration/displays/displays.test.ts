@@ -1,11 +1,11 @@
-import { beforeEach, describe, expect, it } from 'vitest'
+import { beforeAll, describe, expect, it } from 'vitest'
 import type { Problem } from '#shared/types/problem'
 import type { Display } from '#shared/types/workbook'
 import { displayInput, runInput, thermocoupleInput } from '../../factories/records'
 import { channelRows, createWorkbook } from '../../factories/workbook'
 import { resetDatabase } from '../support/reset'
 
-beforeEach(() => resetDatabase())
+beforeAll(() => resetDatabase())
 
 const withoutIds = ({ id: _id, version: _version, ...fields }: Display) => fields
 

@@ -1,11 +1,11 @@
-import { beforeEach, describe, expect, it } from 'vitest'
+import { beforeAll, describe, expect, it } from 'vitest'
 import type { Problem } from '#shared/types/problem'
 import type { ChannelSheet, Probe } from '#shared/types/workbook'
 import { probeInput } from '../../factories/records'
 import { createWorkbook } from '../../factories/workbook'
 import { resetDatabase } from '../support/reset'
 
-beforeEach(() => resetDatabase())
+beforeAll(() => resetDatabase())
 
 describe('a probe', () => {
   it('is logged, logged anew and removed', async () => {

@@ -1,4 +1,4 @@
-import { beforeEach, describe, expect, it } from 'vitest'
+import { beforeAll, describe, expect, it } from 'vitest'
 import { solveChannel } from '#shared/domain/channelRun'
 import type { WiringRunInput } from '#shared/schemas/run'
 import type { Problem } from '#shared/types/problem'
@@ -7,7 +7,7 @@ import { runInput } from '../../factories/records'
 import { createWorkbook } from '../../factories/workbook'
 import { resetDatabase } from '../support/reset'
 
-beforeEach(() => resetDatabase())
+beforeAll(() => resetDatabase())
 
 interface RunAnswer {
   run: WiringRun

@@ -1,4 +1,4 @@
-import { beforeEach, describe, expect, it } from 'vitest'
+import { beforeAll, describe, expect, it } from 'vitest'
 import type { Problem } from '#shared/types/problem'
 import type { OperatingState, ZoneGrid, ZoneTemperature } from '#shared/types/workbook'
 import { runInput } from '../../factories/records'
@@ -6,7 +6,7 @@ import type { Workbook } from '../../factories/workbook'
 import { channelRows, createWorkbook } from '../../factories/workbook'
 import { resetDatabase } from '../support/reset'
 
-beforeEach(() => resetDatabase())
+beforeAll(() => resetDatabase())
 
 interface TemperatureAnswer {
   temperature: ZoneTemperature

@@ -1,11 +1,11 @@
-import { beforeEach, describe, expect, it } from 'vitest'
+import { beforeAll, describe, expect, it } from 'vitest'
 import type { Problem } from '#shared/types/problem'
 import type { Zone, ZoneGrid } from '#shared/types/workbook'
 import { displayInput, runInput, thermocoupleInput } from '../../factories/records'
 import { createWorkbook } from '../../factories/workbook'
 import { resetDatabase } from '../support/reset'
 
-beforeEach(() => resetDatabase())
+beforeAll(() => resetDatabase())
 
 const nook = { name: 'Nook', kind: 'other', celsius: 33.5 } as const
 
