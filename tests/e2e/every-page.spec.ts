@@ -1,0 +1,97 @@
+import AxeBuilder from '@axe-core/playwright'
+import type { Page } from '@playwright/test'
+import { expect, test } from '@playwright/test'
+import { ready, signIn } from './support/pages'
+
+const PUBLIC = [
+  '/',
+  '/register',
+  '/sign-in',
+  '/bench',
+  '/bench/thermocouple',
+  '/bench/thermocouple/table',
+  '/bench/run',
+  '/nowhere',
+]
+const WORKBOOK = [
+  '/account',
+  '/aircraft',
+  '/aircraft/new',
+  '/aircraft/1',
+  '/aircraft/1/channels',
+  '/aircraft/1/channels/new',
+  '/aircraft/1/channels/1',
+  '/aircraft/1/channels/2',
+  '/aircraft/1/channels/1/run',
+  '/aircraft/1/channels/1/probe',
+  '/aircraft/1/channels/1/edit',
+  '/aircraft/1/zones',
+  '/aircraft/1/displays',
+  '/aircraft/1/displays/new',
+  '/aircraft/1/displays/1',
+  '/aircraft/1/history',
+  '/aircraft/1/settings',
+]
+
+/** What a page must never do: ask another host, break the content policy, or draw itself twice. */
+function watchForTrouble(page: Page, baseURL: string): string[] {
+  const troubles: string[] = []
+  page.on('request', (request) => {
+    const { protocol, origin } = new URL(request.url())
+    if (protocol.startsWith('http') && origin !== new URL(baseURL).origin)
+      troubles.push(`asks ${request.url()}`)
+  })
+  page.on('console', (message) => {
+    if (/Content Security Policy|Hydration|Vue warn/.test(message.text())) troubles.push(message.text())
+  })
+  page.on('pageerror', (error) => troubles.push(error.message))
+  return troubles
+}
+
+async function examine(page: Page, path: string): Promise<void> {
+  await page.goto(path)
+  await ready(page)
+  const sideways = await page.evaluate(
+    () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
+  )
+  expect.soft(sideways, `${path} scrolls sideways`).toBeLessThanOrEqual(0)
+  const { violations } = await new AxeBuilder({ page }).analyze()
+  const found = violations.map(
+    ({ id, nodes }) => `${id}: ${nodes.map(({ target }) => target.join(' ')).join(', ')}`,
+  )
+  expect.soft(found, `${path} by axe`).toEqual([])
+}
+
+for (const colorScheme of ['light', 'dark'] as const) {
+  test.describe(colorScheme, () => {
+    test.use({ colorScheme })
+    test.setTimeout(180_000)
+
+    test('public pages are accessible, self-contained and fit the screen', async ({ page, baseURL }) => {
+      const troubles = watchForTrouble(page, baseURL ?? '')
+      for (const path of PUBLIC) await examine(page, path)
+      expect(troubles).toEqual([])
+    })
+
+    test('pages of the workbook are accessible, self-contained and fit the screen', async ({
+      page,
+      baseURL,
+    }) => {
+      await signIn(page, 'owner@demo.cowlbook.invalid', 'cowlbook-demo')
+      await expect(page.getByRole('heading', { name: 'Your aircraft' })).toBeVisible()
+      const troubles = watchForTrouble(page, baseURL ?? '')
+      for (const path of WORKBOOK) await examine(page, path)
+      expect(troubles).toEqual([])
+    })
+  })
+}
+
+test('a demo inspector sees the aircraft and none of the controls that change it', async ({ page }) => {
+  await signIn(page, 'inspector@demo.cowlbook.invalid', 'cowlbook-demo')
+  await expect(page.getByRole('heading', { name: 'Your aircraft' })).toBeVisible()
+  await page.goto('/aircraft/1/channels/1')
+  await expect(page.getByRole('heading', { name: 'EGT 1' })).toBeVisible()
+  await expect(page.getByRole('link', { name: 'Edit the run' })).toHaveCount(0)
+  await page.goto('/aircraft/1/channels/1/run')
+  await expect(page).toHaveURL(/\/channels\/1$/)
+})
