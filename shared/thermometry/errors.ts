@@ -9,6 +9,11 @@ export class ThermometryError extends Error {
   }
 }
 
+/** A limit as it is printed: whole degrees stay whole, emf limits need no more than 0.1 µV. */
+function printed(limit: number): number {
+  return Number(limit.toFixed(4))
+}
+
 /** A value outside the range in which the published data hold. */
 export class OutOfRangeError extends ThermometryError {
   constructor(
@@ -22,7 +27,7 @@ export class OutOfRangeError extends ThermometryError {
   ) {
     super(
       'out-of-range',
-      `The ${what} ${value} ${unit} is outside its range, ${low} to ${high} ${unit}.${reason ? ` ${reason}` : ''}`,
+      `The ${what} ${value} ${unit} is outside its range, ${printed(low)} to ${printed(high)} ${unit}.${reason ? ` ${reason}` : ''}`,
     )
     this.name = 'OutOfRangeError'
   }

@@ -9,6 +9,12 @@ import { sensitivityMillivoltsPerKelvin } from './sensitivityMillivoltsPerKelvin
 /** Type B has its least emf near 21 °C and no emf again near 42 °C; above that the emf is positive and rises. */
 const TYPE_B_RISING_FROM_CELSIUS = 42
 
+/**
+ * What a sum of floating-point numbers may lose, mV. Without it the emf of a temperature within a hair of an end of
+ * the range would be refused, the sum at the end itself having come out smaller.
+ */
+const ROUNDING_MILLIVOLTS = 1e-11
+
 export interface InverseRange {
   lowCelsius: number
   highCelsius: number
@@ -69,10 +75,10 @@ export function celsiusFromMillivolts(type: LetterType, millivolts: number): num
   if (!Number.isFinite(millivolts)) throw new NotANumberError(`type ${type} emf`)
   const range = inverseRange(type)
   const { lowMillivolts, highMillivolts } = range
-  const tooLow = type === 'B' ? millivolts <= 0 : millivolts < lowMillivolts
-  if (tooLow || millivolts > highMillivolts) {
+  const tooLow = type === 'B' ? millivolts <= 0 : millivolts < lowMillivolts - ROUNDING_MILLIVOLTS
+  if (tooLow || millivolts > highMillivolts + ROUNDING_MILLIVOLTS) {
     const reason =
-      type === 'B'
+      type === 'B' && tooLow
         ? 'Below about 42 °C type B has two temperatures for one emf, so only a positive emf tells.'
         : ''
     throw new OutOfRangeError(`type ${type} emf`, millivolts, lowMillivolts, highMillivolts, 'mV', reason)

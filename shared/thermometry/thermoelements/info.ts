@@ -2,8 +2,10 @@ import type { LetterType } from '../its90'
 import { letterTypeRange } from '../its90'
 import { platinumLegRange } from './emfAgainstPlatinum67'
 import type { Thermoelement } from './ids'
+import { isMagnetic } from './magnetism'
 import { OTHER_METALS_AGAINST_PLATINUM, OTHER_METALS_STEP_KELVIN } from './otherMetals'
 import type { OtherMetal } from './otherMetals'
+import { SINGLE_LEG_FUNCTIONS } from './singleLegs'
 
 const LETTER_FUNCTIONS = 'ITS-90 reference functions, NIST Monograph 175'
 const SINGLE_LEGS = 'single-leg tables against Pt-67, NIST Monograph 175'
@@ -22,6 +24,8 @@ export interface ThermoelementInfo {
   source: string
   /** True where at least two independent copies of the figures agreed. */
   verified: boolean
+  /** Whether a magnet attracts it at room temperature; undefined where that is not known or depends on its working. */
+  magnetic: boolean | undefined
 }
 
 interface Range {
@@ -55,18 +59,18 @@ const LEGS: Record<LegId, readonly [name: string, range: Range, source: string, 
   KN: ['nickel-aluminium', RANGES.EK, LETTER_FUNCTIONS, true],
   EP: ['nickel-chromium', RANGES.E, LETTER_FUNCTIONS, true],
   EN: ['copper-nickel (constantan of E and T)', RANGES.E, LETTER_FUNCTIONS, true],
-  JP: ['iron', RANGES.J, SINGLE_LEGS, false],
-  JN: ['copper-nickel (constantan of J)', RANGES.J, SINGLE_LEGS, false],
+  JP: ['iron', RANGES.J, SINGLE_LEGS, SINGLE_LEG_FUNCTIONS.JP.verified],
+  JN: ['copper-nickel (constantan of J)', RANGES.J, SINGLE_LEGS, SINGLE_LEG_FUNCTIONS.JN.verified],
   TP: ['copper', RANGES.T, LETTER_FUNCTIONS, true],
   TN: ['copper-nickel (constantan of E and T)', RANGES.E, LETTER_FUNCTIONS, true],
-  NP: ['nickel-chromium-silicon', RANGES.N, SINGLE_LEGS, false],
-  NN: ['nickel-silicon', RANGES.N, SINGLE_LEGS, false],
+  NP: ['nickel-chromium-silicon', RANGES.N, SINGLE_LEGS, SINGLE_LEG_FUNCTIONS.NP.verified],
+  NN: ['nickel-silicon', RANGES.N, SINGLE_LEGS, SINGLE_LEG_FUNCTIONS.NN.verified],
   RP: ['platinum-13 % rhodium', RANGES.R, SINGLE_LEGS, true],
   RN: ['platinum', RANGES.R, SINGLE_LEGS, true],
   SP: ['platinum-10 % rhodium', RANGES.S, SINGLE_LEGS, true],
   SN: ['platinum', RANGES.R, SINGLE_LEGS, true],
-  BP: ['platinum-30 % rhodium', RANGES.B, SINGLE_LEGS, true],
-  BN: ['platinum-6 % rhodium', RANGES.B, SINGLE_LEGS, true],
+  BP: ['platinum-30 % rhodium', RANGES.B, SINGLE_LEGS, SINGLE_LEG_FUNCTIONS.BP.verified],
+  BN: ['platinum-6 % rhodium', RANGES.B, SINGLE_LEGS, SINGLE_LEG_FUNCTIONS.BN.verified],
   Cu: ['copper', RANGES.T, LETTER_FUNCTIONS, true],
 }
 
@@ -105,13 +109,23 @@ function legInfo(id: LegId): ThermoelementInfo {
           type: id.charAt(0) as LetterType,
           leg: id.endsWith('P') ? ('positive' as const) : ('negative' as const),
         }
-  return { id, symbol: id, name, letter, lowCelsius, highCelsius, source, verified }
+  return { id, symbol: id, name, letter, lowCelsius, highCelsius, source, verified, magnetic: isMagnetic(id) }
 }
 
 function metalInfo(id: OtherMetal): ThermoelementInfo {
   const [symbol, name] = METALS[id]
   const highCelsius = (OTHER_METALS_AGAINST_PLATINUM[id].length - 1) * OTHER_METALS_STEP_KELVIN
-  return { id, symbol, name, letter: null, lowCelsius: 0, highCelsius, source: RECALLED, verified: false }
+  const range = { lowCelsius: 0, highCelsius }
+  return {
+    id,
+    symbol,
+    name,
+    letter: null,
+    ...range,
+    source: RECALLED,
+    verified: false,
+    magnetic: isMagnetic(id),
+  }
 }
 
 /** What a conductor is, and where its data hold (°C). */
