@@ -6,8 +6,10 @@ import { problemOf, useApi } from './useApi'
  */
 export async function useApiData<Answer>(key: string, path: () => string) {
   const api = useApi()
+  // Per page: while one page gives way to the next, a shared key would hand over what the first had loaded.
+  const pageKey = `${key} on ${useRoute().path}`
   const { data, refresh } = await useAsyncData(
-    key,
+    pageKey,
     async () => {
       try {
         return await api.get<Answer>(path())
