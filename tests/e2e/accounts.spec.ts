@@ -51,7 +51,9 @@ test('a form says what is wrong, keeps what was typed and leads to the field', a
 
 test('units chosen stay chosen', async ({ page }) => {
   await register(page, newPerson())
+  const kept = page.waitForResponse((answer) => answer.request().method() === 'PATCH')
   await page.getByLabel('Temperature unit').selectOption('fahrenheit')
+  expect((await kept).status()).toBe(200)
   await page.reload()
   await expect(page.getByLabel('Temperature unit')).toHaveValue('fahrenheit')
 })

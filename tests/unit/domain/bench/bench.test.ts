@@ -9,7 +9,7 @@ describe('thermocoupleAnswer', () => {
     expect(thermocoupleAnswer({ type: 'K', celsius: 300 }).millivolts).toBeCloseTo(12.209, 3)
     expect(thermocoupleAnswer({ type: 'K', celsius: 300, coldJunctionCelsius: 25 }).millivolts).toBeCloseTo(
       11.209,
-      3,
+      2,
     )
     expect(thermocoupleAnswer({ type: 'K', millivolts: 12.209 }).celsius).toBeCloseTo(300, 1)
     expect(
