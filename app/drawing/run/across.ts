@@ -136,7 +136,7 @@ function areas(model: RunModel, places: TrackPlaces): Primitives['areas'] {
   ])
   return model.parts.flatMap(({ id, words }) => {
     const [from, to] = reach.get(id) ?? [0, 0]
-    const box = { x: from, y: POSITIVE_Y - 22, width: to - from, height: NEGATIVE_Y - POSITIVE_Y + 44 }
+    const box = { x: from, y: POSITIVE_Y - 18, width: to - from, height: NEGATIVE_Y - POSITIVE_Y + 36 }
     return [{ partId: id, words, box }]
   })
 }

@@ -32,13 +32,14 @@ function sectionWords(model: Unnamed, section: SectionModel, index: number, labe
 function stationWords(station: StationModel): string {
   const { kind, label, metals, tipSideZone, displaySideZone } = station
   const kindWords = kind === 'terminals' ? 'display terminals' : jointKindWords(kind)
-  const named = label.toLowerCase() === kindWords || kind === 'terminals' ? '' : `, ${label}`
+  const isSaidByLabel = label.toLowerCase().includes(kindWords)
+  const named = kind === 'terminals' ? kindWords : isSaidByLabel ? label : `${kindWords}, ${label}`
   const where =
     tipSideZone.key === displaySideZone.key
       ? `in ${zoneWords(tipSideZone)}`
       : `from ${zoneWords(tipSideZone)} to ${zoneWords(displaySideZone)}`
   return [
-    `${kindWords.charAt(0).toUpperCase()}${kindWords.slice(1)}${named}: ${where}`,
+    `${named.charAt(0).toUpperCase()}${named.slice(1)}: ${where}`,
     ...(metals ? [`contacts ${metals.positive.symbol} positive, ${metals.negative.symbol} negative`] : []),
     ...(station.crossed ? ['conductors crossed'] : []),
     ...(station.swapped ? ['legs swapped here'] : []),
