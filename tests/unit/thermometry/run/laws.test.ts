@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { emfMillivolts, legsOf } from '#shared/thermometry'
+import { emfMillivolts } from '#shared/thermometry'
 import { solveRun } from '#shared/thermometry/run'
 import { baseType, celsius, conductor, randomRun } from './arbitraries'
 import { joint, run, section, twoSections } from './build'
