@@ -2,7 +2,7 @@ import type { MaybeRefOrGetter } from 'vue'
 import { runDrawings } from '~/drawing/run/runGeometry'
 import { runModel } from '~/drawing/run/runModel'
 import type { RunView } from '~/drawing/run/types'
-import { useFigureWords } from '~/composables/useFigureWords'
+import { useFigureWords } from '~/composables/drawing/useFigureWords'
 
 /** A run drawn for wide and narrow sheets and told in words, in the person's units. */
 export function useRunDrawing(view: MaybeRefOrGetter<RunView>) {
