@@ -23,6 +23,8 @@ export default defineConfig(async () => ({
         // One database, so one file after the other.
         fileParallelism: false,
         testTimeout: 20_000,
+        // The demo is loaded in one hook: four password hashes and some hundred writes.
+        hookTimeout: 60_000,
       }),
       nodeProject('bench', { include: [], benchmark: { include: ['tests/bench/**/*.bench.ts'] } }),
       await defineVitestProject({
@@ -30,6 +32,7 @@ export default defineConfig(async () => ({
           name: 'nuxt',
           environment: 'nuxt',
           include: ['tests/nuxt/**/*.test.ts'],
+          setupFiles: ['tests/nuxt/setup.ts'],
           environmentOptions: { nuxt: { domEnvironment: 'happy-dom' } },
         },
       }),
