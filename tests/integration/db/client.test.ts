@@ -87,16 +87,24 @@ describe('a transaction', () => {
       .insert(auditChains)
       .values([chain('account:1'), chain('account:2')])
     let runs = 0
+    let holders = 0
+    const bothHoldOne = new Promise<void>((resolve) => {
+      const look = setInterval(() => {
+        if (holders < 2) return
+        clearInterval(look)
+        resolve()
+      }, 5)
+    })
     const lockBoth = (one: string, other: string) =>
       inTransaction(async (tx) => {
         runs += 1
-        for (const name of [one, other]) {
-          await tx.update(auditChains).set({ sequence: runs }).where(eq(auditChains.chain, name))
-          await new Promise((resolve) => setTimeout(resolve, 50))
-        }
+        await tx.update(auditChains).set({ sequence: runs }).where(eq(auditChains.chain, one))
+        holders += 1
+        await bothHoldOne
+        await tx.update(auditChains).set({ sequence: runs }).where(eq(auditChains.chain, other))
       })
     await Promise.all([lockBoth('account:1', 'account:2'), lockBoth('account:2', 'account:1')])
-    expect(runs).toBeGreaterThan(2)
+    expect(runs).toBe(3)
   })
 
   it('gives other errors on at once', async () => {
