@@ -7,7 +7,7 @@ import { isLeaving, leave, leaveOnSignals, tearDown, waitForTheEnd } from './lib
 import { CHROMIUM, MARIADB, ensureFromDebian } from './lib/setup/debian.mjs'
 import { ensureNodeModules, requireNode } from './lib/setup/node-modules.mjs'
 import { chooseStages } from './lib/testing/stages.mjs'
-import { runStage } from './lib/testing/run-stage.mjs'
+import { runStage, runVerdicts } from './lib/testing/run-stage.mjs'
 import { exitCodeOf, lastLine, summaryTable } from './lib/testing/summary.mjs'
 
 const INTERRUPTED = 130
@@ -37,10 +37,14 @@ async function setUp(stages) {
 async function test() {
   const { stages, passedOn } = chooseStages(process.argv.slice(2))
   const environment = await setUp(stages)
-  const results = []
-  for (const stage of stages) {
+  const surroundings = { environment, passedOn }
+  const results = await runVerdicts(
+    stages.filter(({ kind }) => kind === 'verdict'),
+    surroundings,
+  )
+  for (const stage of stages.filter(({ kind }) => kind !== 'verdict')) {
     if (isLeaving()) await waitForTheEnd()
-    const result = await runStage(stage, { environment, passedOn })
+    const result = await runStage(stage, surroundings)
     results.push(result)
     // Without a build there is nothing that the later stages could run against.
     if (stage.kind === 'build' && result.failed > 0) break

@@ -12,23 +12,60 @@ const REPORT_FOLDER = path.join(rootFolder, 'test-results')
 const LIMIT_MILLISECONDS = 10 * 60_000
 
 /** @typedef {import('./stages.mjs').Stage} Stage */
+/** @typedef {import('./summary.mjs').StageResult} StageResult */
 /** @typedef {{ environment: NodeJS.ProcessEnv, passedOn: string[] }} Surroundings */
+
+/**
+ * Runs the stages that only look at the sources, two at a time: each of them leaves a core idle by itself. What one
+ * prints is shown when it is done, so that the two do not mix.
+ * @param {Stage[]} stages
+ * @param {Surroundings} surroundings
+ * @returns {Promise<StageResult[]>}
+ */
+export async function runVerdicts(stages, surroundings) {
+  const waiting = [...stages.entries()]
+  /** @type {StageResult[]} */
+  const results = []
+  const work = async () => {
+    for (let next = waiting.shift(); next; next = waiting.shift()) {
+      results[next[0]] = await runVerdict(next[1], surroundings)
+    }
+  }
+  await Promise.all([work(), work()])
+  return results
+}
+
+/** @param {Stage} stage @param {Surroundings} surroundings */
+async function runVerdict(stage, { environment }) {
+  const begin = Date.now()
+  const { code, output } = await run(stage.command ?? [], environment, false)
+  printHeading(stage)
+  console.log(output.trimEnd())
+  return ending(stage, countVerdict(code), begin)
+}
 
 /**
  * Runs one stage to its end, showing what it prints as it comes.
  * @param {Stage} stage
  * @param {Surroundings} surroundings
- * @returns {Promise<import('./summary.mjs').StageResult>}
+ * @returns {Promise<StageResult>}
  */
 export async function runStage(stage, surroundings) {
   const begin = Date.now()
-  console.log(`\n── ${stage.name} ${'─'.repeat(Math.max(0, 70 - stage.name.length))}`)
-  const count = await countOf(stage, surroundings)
+  printHeading(stage)
+  return ending(stage, await countOf(stage, surroundings), begin)
+}
+
+/** @param {Stage} stage */
+function printHeading({ name }) {
+  console.log(`\n── ${name} ${'─'.repeat(Math.max(0, 70 - name.length))}`)
+}
+
+/** @param {Stage} stage @param {import('./counting.mjs').Count} count @param {number} begin */
+function ending({ name }, count, begin) {
   const milliseconds = Date.now() - begin
-  console.log(
-    `── ${stage.name}: ${count.passed} passed, ${count.failed} failed, ${elapsedText(milliseconds)}`,
-  )
-  return { ...count, name: stage.name, milliseconds }
+  console.log(`── ${name}: ${count.passed} passed, ${count.failed} failed, ${elapsedText(milliseconds)}`)
+  return { ...count, name, milliseconds }
 }
 
 /**
@@ -38,16 +75,13 @@ export async function runStage(stage, surroundings) {
  */
 async function countOf(stage, surroundings) {
   if (stage.kind === 'build') return buildStage()
-  if (stage.kind === 'verdict') {
-    return countVerdict(await run(stage.command ?? [], surroundings.environment))
-  }
   const reportFile = path.join(REPORT_FOLDER, `${stage.name}.json`)
   await mkdir(REPORT_FOLDER, { recursive: true })
   await rm(reportFile, { force: true })
   const isVitest = stage.kind === 'vitest'
   const command = isVitest ? vitestCommand(stage.name, reportFile) : ['playwright', 'test']
   const environment = { ...surroundings.environment, PLAYWRIGHT_JSON_OUTPUT_FILE: reportFile }
-  const exitCode = await run([...command, ...surroundings.passedOn], environment)
+  const { code: exitCode } = await run([...command, ...surroundings.passedOn], environment, true)
   const report = await readReport(reportFile)
   return isVitest ? countVitest(report, exitCode) : countPlaywright(report, exitCode)
 }
@@ -58,17 +92,17 @@ function vitestCommand(project, reportFile) {
   return ['vitest', 'run', '--project', project, ...reporters]
 }
 
-/** @param {string[]} command @param {NodeJS.ProcessEnv} environment */
-async function run(command, environment) {
+/** @param {string[]} command @param {NodeJS.ProcessEnv} environment @param {boolean} show */
+async function run(command, environment, show) {
   const [program = '', ...parameters] = command
   const outcome = await runToEnd(packageProgram(program), parameters, {
     cwd: rootFolder,
     env: environment,
-    show: true,
+    show,
     limitMilliseconds: LIMIT_MILLISECONDS,
   })
-  if (outcome.output) console.log(outcome.output)
-  return outcome.code
+  if (show && outcome.output) console.log(outcome.output)
+  return outcome
 }
 
 /** @returns {Promise<import('./counting.mjs').Count>} */

@@ -8,11 +8,11 @@ import { Failure } from '../failure.mjs'
  * @property {'database'} [needs]
  */
 
-/** In the order of what tells most soonest. @type {Stage[]} */
+/** The longest of the checks on the sources first, for the others run beside it. @type {Stage[]} */
 export const STAGES = [
+  { name: 'typecheck', kind: 'verdict', command: ['nuxt', 'typecheck'] },
   { name: 'lint', kind: 'verdict', command: ['eslint', '.', '--max-warnings', '0'] },
   { name: 'format', kind: 'verdict', command: ['prettier', '--check', '.'] },
-  { name: 'typecheck', kind: 'verdict', command: ['nuxt', 'typecheck'] },
   { name: 'knip', kind: 'verdict', command: ['knip'] },
   { name: 'unit', kind: 'vitest' },
   { name: 'architecture', kind: 'vitest' },
