@@ -2,7 +2,7 @@ import { toTypedSchema } from '@vee-validate/zod'
 import { useForm } from 'vee-validate'
 import type { z } from 'zod'
 import type { Problem } from '#shared/types/problem'
-import { problemOf } from './useApi'
+import { problemOf } from '~/composables/api/useApi'
 
 export interface FormError {
   /** Dotted path of the field; empty for the form as a whole. */

@@ -1,7 +1,7 @@
 import { defineStore } from 'pinia'
 import type { ChangePasswordInput, Preferences, RegisterInput, SignInInput } from '#shared/schemas/account'
 import type { Account } from '#shared/types/account'
-import { problemOf, useApi } from '~/composables/useApi'
+import { problemOf, useApi } from '~/composables/api/useApi'
 import { useUnitsStore } from './units'
 
 /** Who is signed in, as the server says. */

@@ -1,10 +1,9 @@
 import type { Thermoelement } from '../thermoelements'
 import { legsOf } from '../thermoelements'
 import type { Circuit, CircuitElement, LegConductors } from './circuit'
-import { exchangeLegs } from './circuit'
 import { RunInputError } from './errors'
 import { isReversed } from './orientation'
-import type { LegValues, Place, RunConditions, RunJoint, ThermocoupleRun } from './types'
+import type { LegValues, Place, RunConditions, RunJoint, RunSection, ThermocoupleRun } from './types'
 
 const COPPER: LegConductors = { positive: 'Cu', negative: 'Cu' }
 
@@ -87,6 +86,66 @@ function checkRun(run: ThermocoupleRun): void {
   })
 }
 
+/** A run with what is worked out once for all of its elements. */
+interface Preparation {
+  run: ThermocoupleRun
+  /** By section: whether an odd number of crossings lies between it and the display. */
+  odd: readonly boolean[]
+  /** By joint: temperatures of its contacts. */
+  contacts: readonly ResolvedJoint[]
+  tip: LegValues
+  terminals: LegValues
+  /** Index of the reference block the display relies on; −1 where the terminals are the reference point. */
+  block: number
+}
+
+/** What the conductors of a section should be: the planned type, and copper beyond a reference block. */
+function intendedAt({ run, block }: Preparation, sectionIndex: number): LegConductors {
+  return block >= 0 && sectionIndex > block ? COPPER : legsOf(run.type)
+}
+
+function resolvedConductors({ run, odd }: Preparation, sectionIndex: number): LegConductors {
+  const { positive, negative } = run.sections[sectionIndex] as RunSection
+  return odd[sectionIndex] ? { positive: negative, negative: positive } : { positive, negative }
+}
+
+function sectionElement(prepared: Preparation, index: number): CircuitElement {
+  const { run, odd, contacts, tip, terminals } = prepared
+  const conductors = resolvedConductors(prepared, index)
+  const intended = intendedAt(prepared, index)
+  return {
+    place: { kind: 'section', sectionId: (run.sections[index] as RunSection).id },
+    kind: 'section',
+    displayEnd: { place: boundaryAfter(run, index), side: 'tip-side' },
+    conductors,
+    intended,
+    reversed: isReversed(conductors, intended, odd[index] ?? false),
+    tipSideCelsius: contacts[index - 1]?.displaySide ?? tip,
+    displaySideCelsius: contacts[index]?.tipSide ?? terminals,
+  }
+}
+
+/** The contacts of a joint, where they have length; none where the conductors meet directly. */
+function jointElement(prepared: Preparation, index: number): CircuitElement[] {
+  const { run, odd, contacts, block } = prepared
+  const joint = run.joints[index]
+  const temperatures = contacts[index]
+  if (!joint || !temperatures || !hasLength(joint)) return []
+  const place: Place = { kind: 'joint', jointId: joint.id }
+  return [
+    {
+      place,
+      kind: 'joint',
+      displayEnd: { place, side: 'display-side' },
+      conductors: jointConductors(joint, resolvedConductors(prepared, index + 1), odd[index + 1] ?? false),
+      intended: intendedAt(prepared, index === block ? index + 1 : index),
+      reversed: false,
+      tipSideCelsius: temperatures.tipSide,
+      displaySideCelsius: temperatures.displaySide,
+    },
+  ]
+}
+
 /**
  * Resolves crossings, zones and the reference point of a run: the circuit as the current sees it.
  *
@@ -96,63 +155,31 @@ export function resolveCircuit(run: ThermocoupleRun, conditions: RunConditions):
   checkRun(run)
   const tipCelsius = zoneCelsius(conditions, run.tipZone, 'tipZone')
   const terminalCelsius = zoneCelsius(conditions, run.terminals.zone, 'terminals.zone')
-  const terminalContacts = withOffsets(terminalCelsius, run.terminals)
   const odd = crossingsToDisplay(run)
   const needsBlock = run.display.compensation.kind === 'remote-block'
   const block = needsBlock ? run.joints.findIndex((joint) => joint.kind === 'reference-block') : -1
-  const legs: LegConductors = legsOf(run.type)
-  const intendedAt = (sectionIndex: number): LegConductors =>
-    block >= 0 && sectionIndex > block ? COPPER : legs
-
-  const oddAt = (index: number): boolean => odd[index] ?? false
-  const resolved = run.sections.map((section, i): LegConductors => {
-    const pair = { positive: section.positive, negative: section.negative }
-    return oddAt(i) ? exchangeLegs(pair) : pair
-  })
-  const temperatures = run.joints.map((joint, i) => jointTemperatures(joint, i, conditions, oddAt(i + 1)))
-  const tip: LegValues = { positive: tipCelsius, negative: tipCelsius }
-
-  const elements: CircuitElement[] = []
-  run.sections.forEach((section, i) => {
-    const conductors = resolved[i] as LegConductors
-    const intended = intendedAt(i)
-    elements.push({
-      place: { kind: 'section', sectionId: section.id },
-      kind: 'section',
-      displayEnd: { place: boundaryAfter(run, i), side: 'tip-side' },
-      conductors,
-      intended,
-      reversed: isReversed(conductors, intended, oddAt(i)),
-      tipSideCelsius: temperatures[i - 1]?.displaySide ?? tip,
-      displaySideCelsius: temperatures[i]?.tipSide ?? terminalContacts,
-    })
-    const joint = run.joints[i]
-    const contacts = temperatures[i]
-    if (!joint || !contacts || !hasLength(joint)) return
-    elements.push({
-      place: { kind: 'joint', jointId: joint.id },
-      kind: 'joint',
-      displayEnd: { place: { kind: 'joint', jointId: joint.id }, side: 'display-side' },
-      conductors: jointConductors(joint, resolved[i + 1] as LegConductors, oddAt(i + 1)),
-      intended: intendedAt(i === block ? i + 1 : i),
-      reversed: false,
-      tipSideCelsius: contacts.tipSide,
-      displaySideCelsius: contacts.displaySide,
-    })
-  })
-
   const blockJoint = run.joints[block]
-  const referenceCelsius = blockJoint
-    ? zoneCelsius(conditions, blockJoint.tipSideZone, `joints.${block}.tipSideZone`)
-    : terminalCelsius
-  if (run.terminals.positiveOffsetKelvin !== 0 || run.terminals.negativeOffsetKelvin !== 0)
-    elements.push(displayCopper(terminalContacts, terminalCelsius, intendedAt(run.sections.length)))
+  const prepared: Preparation = {
+    run,
+    odd,
+    contacts: run.joints.map((joint, i) => jointTemperatures(joint, i, conditions, odd[i + 1] ?? false)),
+    tip: { positive: tipCelsius, negative: tipCelsius },
+    terminals: withOffsets(terminalCelsius, run.terminals),
+    block,
+  }
+  const offLevel = run.terminals.positiveOffsetKelvin !== 0 || run.terminals.negativeOffsetKelvin !== 0
+  const beyond = intendedAt(prepared, run.sections.length)
   return {
     type: run.type,
     tipCelsius,
-    referenceCelsius,
-    referenceFound: !needsBlock || !!blockJoint,
-    elements,
+    referenceCelsius: blockJoint
+      ? zoneCelsius(conditions, blockJoint.tipSideZone, `joints.${block}.tipSideZone`)
+      : terminalCelsius,
+    referenceFound: !needsBlock || blockJoint !== undefined,
+    elements: [
+      ...run.sections.flatMap((_, i) => [sectionElement(prepared, i), ...jointElement(prepared, i)]),
+      ...(offLevel ? [displayCopper(prepared.terminals, terminalCelsius, beyond)] : []),
+    ],
   }
 }
 

@@ -5,7 +5,7 @@ import EditNumber from '~/components/run/editor/EditNumber.vue'
 import RunEditor from '~/components/run/editor/RunEditor.vue'
 import RunWorkbench from '~/components/run/editor/RunWorkbench.vue'
 import SaveBar from '~/components/run/editor/SaveBar.vue'
-import { sandboxRun } from '~/composables/sandboxRun'
+import { sandboxRun } from '~/composables/run/sandboxRun'
 import { useRunEditorStore } from '~/stores/runEditor'
 
 beforeEach(() => {

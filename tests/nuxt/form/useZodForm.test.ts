@@ -4,7 +4,7 @@ import { describe, expect, it, vi } from 'vitest'
 import { defineComponent, h } from 'vue'
 import { z } from 'zod'
 import ErrorSummary from '~/components/form/ErrorSummary.vue'
-import { ApiFailure } from '~/composables/useApi'
+import { ApiFailure } from '~/composables/api/useApi'
 import { useZodForm } from '~/composables/useZodForm'
 
 const schema = z.object({ name: z.string().min(1, 'Enter a name.') })

@@ -4,7 +4,7 @@ import { QUANTITY_WORDS, SENSOR_WORDS, STANDING_WORDS } from '#shared/domain/wor
 import type { ChannelRow, OperatingState } from '#shared/types/workbook'
 import { CHANNEL_STANDINGS } from '#shared/types/workbook'
 import { NO_VALUE } from '#shared/units'
-import type { useReadingText } from './useReadingText'
+import type { useReadingText } from '~/composables/table/useReadingText'
 
 declare module '@tanstack/vue-table' {
   interface ColumnMeta<TData extends RowData, TValue> {

@@ -1,5 +1,5 @@
 import type { Versioned } from '#shared/types/workbook'
-import { problemOf, useApi } from './useApi'
+import { problemOf, useApi } from '~/composables/api/useApi'
 
 /** Renaming and removing the records of a list, each write carrying the version it was based on. */
 export function useRecordActions(path: string, changed: () => void) {

@@ -3,7 +3,7 @@ import type { SaveRunInput } from '#shared/schemas/run'
 import { saveRunSchema } from '#shared/schemas/run'
 import type { WiringRun } from '#shared/types/workbook'
 import { useRunEditorStore } from '~/stores/runEditor'
-import { problemOf, useApi } from './useApi'
+import { problemOf, useApi } from '~/composables/api/useApi'
 
 /** Saves the run being edited; a stale save is refused with what changed, and nothing of either side is lost. */
 export function useRunSave(path: string) {

@@ -1,6 +1,6 @@
 import type { ZoneGrid, ZoneTemperature } from '#shared/types/workbook'
 import { useRunEditorStore } from '~/stores/runEditor'
-import { problemOf, useApi } from './useApi'
+import { problemOf, useApi } from '~/composables/api/useApi'
 
 /** How long a figure must rest before it is stored, so that typing 120 does not store 1 and 12 on the way. */
 const REST_MILLISECONDS = 600

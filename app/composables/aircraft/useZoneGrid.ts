@@ -1,6 +1,6 @@
 import type { Problem } from '#shared/types/problem'
 import type { ZoneGrid, ZoneTemperature } from '#shared/types/workbook'
-import { ApiFailure, useApi } from './useApi'
+import { ApiFailure, useApi } from '~/composables/api/useApi'
 
 export interface MovedChannel {
   channelId: number

@@ -3,8 +3,8 @@ import { getCoreRowModel, getSortedRowModel, useVueTable } from '@tanstack/vue-t
 import { QUANTITY_WORDS } from '#shared/domain/wording'
 import { QUANTITIES } from '#shared/schemas/aircraft'
 import type { ChannelRow, ChannelStanding, OperatingState } from '#shared/types/workbook'
-import { channelColumns } from './channelColumns'
-import { useReadingText } from './useReadingText'
+import { channelColumns } from '~/composables/table/channelColumns'
+import { useReadingText } from '~/composables/table/useReadingText'
 
 function update<State>(updater: Updater<State>, state: Ref<State>): void {
   state.value = typeof updater === 'function' ? (updater as (old: State) => State)(state.value) : updater

@@ -1,7 +1,7 @@
 import { toOperatingConditions, toThermocoupleRun, zoneKey } from '#shared/domain/channelRun'
 import type { ChannelSheet } from '#shared/types/workbook'
-import { useAircraft } from './useAircraft'
-import { useApiData } from './useApiData'
+import { useAircraft } from '~/composables/aircraft/useAircraft'
+import { useApiData } from '~/composables/api/useApiData'
 
 /** One channel with everything its pages show, loaded in one call. */
 export async function useChannelSheet() {

@@ -1,4 +1,4 @@
-import { problemOf, useApi } from './useApi'
+import { problemOf, useApi } from '~/composables/api/useApi'
 
 /**
  * Loads a record for a page, on the server at first. A refusal becomes the error page of its status, so that an

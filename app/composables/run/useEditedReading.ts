@@ -1,4 +1,4 @@
-import { useSolvedRun } from '~/composables/useSolvedRun'
+import { useSolvedRun } from '~/composables/run/useSolvedRun'
 import { useRunEditorStore } from '~/stores/runEditor'
 import { useUnitsStore } from '~/stores/units'
 
