@@ -15,7 +15,8 @@ const nodeProject = (name: string, more: object = {}) => ({
 export default defineConfig(async () => ({
   test: {
     projects: [
-      nodeProject('unit'),
+      // A thousand random runs a law, and a password hash is slow by design.
+      nodeProject('unit', { testTimeout: 30_000 }),
       nodeProject('reference'),
       nodeProject('architecture'),
       nodeProject('integration', {
