@@ -32,6 +32,7 @@ export default defineConfig(async () => ({
         test: {
           name: 'nuxt',
           environment: 'nuxt',
+          testTimeout: 30_000,
           include: ['tests/nuxt/**/*.test.ts'],
           setupFiles: ['tests/nuxt/setup.ts'],
           environmentOptions: { nuxt: { domEnvironment: 'happy-dom' } },
