@@ -142,7 +142,10 @@ describe('a wiring run', () => {
     for (const version of [null, 1]) {
       const answers = await Promise.all(
         ['one', 'two', 'three'].map((label) =>
-          client.send<Problem>('PUT', at, { version, run: runInput(zone('Engine bay').id, { label }) }),
+          client.send<Problem>('PUT', at, {
+            version,
+            run: runInput(zone('Engine bay').id, { label: `${label}, from ${version}` }),
+          }),
         ),
       )
       expect(answers.map(({ status }) => status).sort()).toEqual([200, 409, 409])
