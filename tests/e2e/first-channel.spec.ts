@@ -100,6 +100,6 @@ test('a zone temperature changed in the editor moves the reading and is stored',
       .first(),
   ).toBeVisible()
   await page.getByRole('link', { name: 'Zones and states' }).click()
-  if (isMobile) await page.getByLabel('Operating state').selectOption({ label: 'Climb' })
+  if (isMobile) await page.getByRole('combobox', { name: 'Operating state' }).selectOption({ label: 'Climb' })
   await expect(page.getByLabel(/Exhaust 1, Climb/)).toHaveValue('655.5')
 })

@@ -59,6 +59,7 @@ export async function layOutAircraft(page: Page, name: string): Promise<void> {
 /** From anywhere on an aircraft to one of its channels. */
 export async function openChannel(page: Page, tag: string): Promise<void> {
   await page.getByRole('link', { name: 'Channels', exact: true }).click()
+  await expect(page.getByRole('heading', { name: 'Channels', level: 1 })).toBeVisible()
   await page.getByRole('link', { name: tag }).filter({ visible: true }).first().click()
   await expect(page.getByRole('heading', { name: tag, level: 1 })).toBeVisible()
 }
