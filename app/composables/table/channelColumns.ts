@@ -62,7 +62,12 @@ export function channelColumns(
       cell: ({ row }) => texts.errorText(row.original) || NO_VALUE,
       meta: { figure: true },
     }),
-    helper.accessor((row) => texts.findingText(row), { id: 'findings', header: 'Findings' }),
+    helper.accessor((row) => texts.findingText(row), {
+      id: 'findings',
+      header: 'Findings',
+      // Never an empty cell: a component that renders nothing does not match what the server sent.
+      cell: ({ row }) => texts.findingText(row.original) || NO_VALUE,
+    }),
     helper.accessor((row) => CHANNEL_STANDINGS.indexOf(row.standing), {
       id: 'standing',
       header: 'Standing',
