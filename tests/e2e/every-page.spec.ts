@@ -48,43 +48,43 @@ function watchForTrouble(page: Page, baseURL: string): string[] {
   return troubles
 }
 
+async function findingsOfAxe(builder: AxeBuilder): Promise<string[]> {
+  const { violations } = await builder.analyze()
+  return violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ target }) => target.join(' ')).join(', ')}`)
+}
+
+/** One page by day with every rule, then by night for what the colours alone can spoil. */
 async function examine(page: Page, path: string): Promise<void> {
+  await page.emulateMedia({ colorScheme: 'light' })
   await page.goto(path)
   await ready(page)
   const sideways = await page.evaluate(
     () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
   )
   expect.soft(sideways, `${path} scrolls sideways`).toBeLessThanOrEqual(0)
-  const { violations } = await new AxeBuilder({ page }).analyze()
-  const found = violations.map(
-    ({ id, nodes }) => `${id}: ${nodes.map(({ target }) => target.join(' ')).join(', ')}`,
-  )
-  expect.soft(found, `${path} by axe`).toEqual([])
+  expect.soft(await findingsOfAxe(new AxeBuilder({ page })), `${path} by axe`).toEqual([])
+  await page.emulateMedia({ colorScheme: 'dark' })
+  const contrast = new AxeBuilder({ page }).withRules(['color-contrast'])
+  expect.soft(await findingsOfAxe(contrast), `${path} by axe, night sheet`).toEqual([])
 }
 
-for (const colorScheme of ['light', 'dark'] as const) {
-  test.describe(colorScheme, () => {
-    test.use({ colorScheme })
-    test.setTimeout(180_000)
+test.describe('every page is accessible, self-contained and fits the screen', () => {
+  test.setTimeout(240_000)
 
-    test('public pages are accessible, self-contained and fit the screen', async ({ page, baseURL }) => {
-      const troubles = watchForTrouble(page, baseURL ?? '')
-      for (const path of PUBLIC) await examine(page, path)
-      expect(troubles).toEqual([])
-    })
-
-    test('pages of the workbook are accessible, self-contained and fit the screen', async ({
-      page,
-      baseURL,
-    }) => {
-      await signIn(page, 'owner@demo.cowlbook.invalid', 'cowlbook-demo')
-      await expect(page.getByRole('heading', { name: 'Your aircraft' })).toBeVisible()
-      const troubles = watchForTrouble(page, baseURL ?? '')
-      for (const path of WORKBOOK) await examine(page, path)
-      expect(troubles).toEqual([])
-    })
+  test('in public', async ({ page, baseURL }) => {
+    const troubles = watchForTrouble(page, baseURL ?? '')
+    for (const path of PUBLIC) await examine(page, path)
+    expect(troubles).toEqual([])
   })
-}
+
+  test('in the workbook', async ({ page, baseURL }) => {
+    await signIn(page, 'owner@demo.cowlbook.invalid', 'cowlbook-demo')
+    await expect(page.getByRole('heading', { name: 'Your aircraft' })).toBeVisible()
+    const troubles = watchForTrouble(page, baseURL ?? '')
+    for (const path of WORKBOOK) await examine(page, path)
+    expect(troubles).toEqual([])
+  })
+})
 
 test('a demo inspector sees the aircraft and none of the controls that change it', async ({ page }) => {
   await signIn(page, 'inspector@demo.cowlbook.invalid', 'cowlbook-demo')
