@@ -13,16 +13,16 @@ describe('AircraftListRow', () => {
     expect(row.get('a').attributes('href')).toBe('/aircraft/7')
     expect(row.text()).toContain('you are owner, builder')
     expect(row.text()).toContain('3 as intended')
-    expect(row.text()).toContain('Next: 1 fault found')
+    expect(row.text()).toContain('Next, fault found (1): Open it')
   })
 
   it('asks for nothing where nothing is missing, or where it is archived', async () => {
     const record = aircraftSheet({ standings: counts({ 'record-only': 4 }) })
-    expect((await mountSuspended(AircraftListRow, { props: { item: record } })).text()).not.toContain('Next:')
+    expect((await mountSuspended(AircraftListRow, { props: { item: record } })).text()).not.toContain('Next,')
     const sheet = aircraftSheet()
     const archived = { ...sheet, aircraft: { ...sheet.aircraft, archivedAt: '2026-06-01T00:00:00.000Z' } }
     expect((await mountSuspended(AircraftListRow, { props: { item: archived } })).text()).not.toContain(
-      'Next:',
+      'Next,',
     )
   })
 })

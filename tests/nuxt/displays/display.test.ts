@@ -68,7 +68,7 @@ describe('DisplayFacts', () => {
     })
     expect(facts.text()).toContain('Display terminals')
     // 2 K more is 3.6 °F more: a difference does not carry the 32.
-    expect(facts.text()).toMatch(/3\.6\s°F too much/)
+    expect(facts.text()).toMatch(/sensor error \+3\.6\s°F/)
     expect(facts.text()).toMatch(/1832(\.0)?\s°F/)
     expect(facts.findAll('input, select, button')).toHaveLength(0)
   })
