@@ -134,7 +134,8 @@ function readingFindings(run: ThermocoupleRun, solution: RunSolution): Finding[]
   const { indication } = solution
   const range = letterTypeRange(run.type)
   const { tipCelsius } = solution
-  const findings: Finding[] = []
+  // Without a value of the planned type at the reference point there is nothing to hold the reading against.
+  const findings = outside({ kind: 'terminals' }, null, run.type, range, solution.referenceCelsius)
   if (tipCelsius < range.lowCelsius || tipCelsius > range.highCelsius)
     findings.push({ code: 'tip-outside-type-range', type: run.type, celsius: tipCelsius, ...range })
   if (indication.kind === 'off-scale-low' || indication.kind === 'off-scale-high')

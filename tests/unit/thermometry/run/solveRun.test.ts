@@ -299,6 +299,42 @@ describe('beyond the data', () => {
     expect(solution.indication.kind).toBe('withheld')
   })
 
+  it('terminals colder than the planned type reaches are named, whatever the conductors', () => {
+    const built = twoSections('B', 'K', {
+      sections: [section('probe', 'K'), section('ext', 'K')],
+      display: display('K'),
+    })
+    const solution = solveRun(built, { zoneCelsius: { tip: 400, plug: 60, terminals: -10 } })
+    expect(solution.indication).toEqual({ kind: 'withheld' })
+    expect(finding(solution, 'outside-conductor-range')).toMatchObject({ conductor: 'B', celsius: -10 })
+  })
+
+  it('nothing a request can carry throws or makes a figure that is no number', () => {
+    for (const [tip, plug, terminals] of [
+      [3000, 3000, 3000],
+      [-273.15, -273.15, -273.15],
+      [400, 3000, -273.15],
+    ] as const)
+      for (const type of ['B', 'K', 'T'] as const)
+        for (const offset of [-500, 0, 500]) {
+          const compensation = { kind: 'internal', sensorOffsetKelvin: offset } as const
+          const built = twoSections(type, ['Cu', 'KN'], {
+            terminals: {
+              zone: 'terminals',
+              crossed: true,
+              positiveOffsetKelvin: offset,
+              negativeOffsetKelvin: 0,
+            },
+            display: display('B', { compensation, gainErrorFraction: -0.5 }),
+          })
+          const solution = solveRun(built, { zoneCelsius: { tip, plug, terminals } })
+          expect(
+            JSON.stringify(solution, (_, value: unknown) => (Number.isNaN(value) ? 'NaN' : value)),
+          ).not.toMatch(/NaN|Infinity/)
+          if (solution.indication.kind === 'withheld') expect(solution.findings).not.toEqual([])
+        }
+  })
+
   it('a run that does not hang together is refused by name', () => {
     const broken = { ...twoSections('K', 'K'), joints: [] }
     expect(() => solveRun(broken, warm)).toThrow(RunInputError)
