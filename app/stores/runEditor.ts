@@ -92,13 +92,18 @@ export const useRunEditorStore = defineStore('run-editor', () => {
     }
   })
 
+  const changed = computed(() => parts.value !== stored.value)
+  /** A proposed run that nobody touched can be proposed again; anything drawn since would be lost. */
+  const unsaved = computed(() => changed.value && (version.value !== null || past.value.length > 0))
+
   return {
     surroundings,
     parts,
     version,
     selected,
     run,
-    changed: computed(() => parts.value !== stored.value),
+    changed,
+    unsaved,
     canUndo: computed(() => past.value.length > 0),
     canRedo: computed(() => future.value.length > 0),
     open,

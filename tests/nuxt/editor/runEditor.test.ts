@@ -42,6 +42,30 @@ describe('the store of the run being edited', () => {
   })
 })
 
+describe('what leaving the page would lose', () => {
+  it('is nothing of a run only proposed, and everything drawn since', () => {
+    const editor = useRunEditorStore()
+    const { surroundings, parts } = sandboxRun('K')
+    editor.open(surroundings, parts, null)
+    expect(editor.unsaved).toBe(false)
+    editor.change({ ...parts })
+    expect(editor.unsaved).toBe(true)
+    editor.undo()
+    expect(editor.unsaved).toBe(false)
+  })
+
+  it('is nothing of a stored run as it stands, and everything changed since', () => {
+    const editor = useRunEditorStore()
+    expect(editor.unsaved).toBe(false)
+    if (!editor.parts) throw new Error('no run')
+    const drawn = { ...editor.parts }
+    editor.change(drawn)
+    expect(editor.unsaved).toBe(true)
+    editor.markSaved(drawn, 4)
+    expect(editor.unsaved).toBe(false)
+  })
+})
+
 describe('RunEditor', () => {
   it('lists the parts from tip to terminals and opens one at a time', async () => {
     const list = await mountSuspended(RunEditor, { props: { stateId: 'climb' } })
@@ -91,6 +115,18 @@ describe('EditNumber', () => {
     expect(number.emitted('update:modelValue')).toBeUndefined()
     expect(number.text()).toContain(reason)
     expect(number.get('input').attributes('aria-invalid')).toBe('true')
+  })
+})
+
+describe('EditNumber, changed from elsewhere', () => {
+  it('drops what was wrong with the figure typed before', async () => {
+    const number = await mountSuspended(EditNumber, {
+      props: { modelValue: 5, label: 'Length', unit: 'm', low: 0, high: 200 },
+    })
+    await number.get('input').setValue('7x')
+    await number.setProps({ modelValue: 6 })
+    expect(number.get('input').element.value).toBe('6')
+    expect(number.get('input').attributes('aria-invalid')).toBeUndefined()
   })
 })
 
